@@ -1,0 +1,131 @@
+package fluewright.engine.calculation;
+
+import java.lang.invoke.MethodHandle;
+import java.lang.invoke.MethodHandles;
+import java.lang.reflect.Constructor;
+import java.lang.reflect.InvocationTargetException;
+import java.lang.reflect.ParameterizedType;
+import java.lang.reflect.RecordComponent;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.Iterator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * The components of a declared record, groups opened.
+ *
+ * @param <T> the record
+ */
+public final class RecordShape<T extends Record> {
+
+    private final Class<T> type;
+    private final Map<String, Term> terms = new LinkedHashMap<>();
+
+    private RecordShape(Class<T> type) {
+        this.type = type;
+    }
+
+    static <T extends Record> RecordShape<T> of(Class<T> type) {
+        RecordShape<T> shape = new RecordShape<>(type);
+        shape.collect(type, List.of());
+        return shape;
+    }
+
+    private void collect(Class<?> record, List<MethodHandle> outer) {
+        for (RecordComponent part : record.getRecordComponents()) {
+            List<MethodHandle> path = new ArrayList<>(outer);
+            path.add(accessor(part));
+            Component declared = part.getAnnotation(Component.class);
+            if (declared != null) {
+                add(new Term(part.getName(), valueType(part), isOptional(part.getType()), declared, List.copyOf(path)));
+            } else if (part.getType().isRecord()) {
+                collect(part.getType(), path);
+            } else {
+                throw new IllegalStateException(record.getName() + "." + part.getName() + " needs a @Component");
+            }
+        }
+    }
+
+    private void add(Term term) {
+        if (terms.put(term.name(), term) != null) {
+            throw new IllegalStateException(type.getName() + " has two components named " + term.name());
+        }
+    }
+
+    private static MethodHandle accessor(RecordComponent part) {
+        try {
+            part.getAccessor().setAccessible(true);
+            return MethodHandles.lookup().unreflect(part.getAccessor());
+        } catch (IllegalAccessException e) {
+            throw new IllegalStateException(part.getDeclaringRecord().getName() + " must be public", e);
+        }
+    }
+
+    private static boolean isOptional(Class<?> type) {
+        return type == OptionalDouble.class || type == Optional.class;
+    }
+
+    private static Class<?> valueType(RecordComponent part) {
+        if (part.getType() == OptionalDouble.class) {
+            return double.class;
+        }
+        if (part.getType() == Optional.class) {
+            return (Class<?>) ((ParameterizedType) part.getGenericType()).getActualTypeArguments()[0];
+        }
+        return part.getType();
+    }
+
+    /** Returns the components in the order of the record. */
+    public Collection<Term> terms() {
+        return terms.values();
+    }
+
+    /** Returns the names of the components. */
+    public Collection<String> names() {
+        return terms.keySet();
+    }
+
+    /** Returns the component of a name. */
+    public Optional<Term> find(String name) {
+        return Optional.ofNullable(terms.get(name));
+    }
+
+    /** Makes the record of its components' values, in the order of {@link #terms()}; null stands for left out. */
+    T make(Iterator<Object> values) {
+        return type.cast(make(type, values));
+    }
+
+    private static Object make(Class<?> record, Iterator<Object> values) {
+        RecordComponent[] parts = record.getRecordComponents();
+        Object[] arguments = new Object[parts.length];
+        Class<?>[] types = new Class<?>[parts.length];
+        for (int i = 0; i < parts.length; i++) {
+            types[i] = parts[i].getType();
+            arguments[i] = parts[i].isAnnotationPresent(Component.class) ? wrapped(types[i], values.next()) : make(types[i], values);
+        }
+        return construct(record, types, arguments);
+    }
+
+    private static Object wrapped(Class<?> type, Object value) {
+        if (type == OptionalDouble.class) {
+            return value == null ? OptionalDouble.empty() : OptionalDouble.of((Double) value);
+        }
+        return type == Optional.class ? Optional.ofNullable(value) : value;
+    }
+
+    private static Object construct(Class<?> record, Class<?>[] types, Object[] arguments) {
+        try {
+            Constructor<?> constructor = record.getDeclaredConstructor(types);
+            constructor.setAccessible(true);
+            return constructor.newInstance(arguments);
+        } catch (InvocationTargetException e) {
+            throw e.getCause() instanceof RuntimeException cause ? cause : new IllegalStateException(e.getCause());
+        } catch (ReflectiveOperationException e) {
+            throw new IllegalStateException("cannot make " + record.getName(), e);
+        }
+    }
+}

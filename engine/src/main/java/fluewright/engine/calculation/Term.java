@@ -1,0 +1,128 @@
+package fluewright.engine.calculation;
+
+import fluewright.engine.quantity.Basis;
+import fluewright.engine.quantity.Kind;
+import java.lang.invoke.MethodHandle;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** A declared component of an input or result record, as the catalog's users see it. */
+public final class Term {
+
+    private final String name;
+    private final Class<?> type;
+    private final boolean optional;
+    private final Component declared;
+    private final List<MethodHandle> path;
+    private final Interval possible;
+    private final Interval valid;
+
+    Term(String name, Class<?> type, boolean optional, Component declared, List<MethodHandle> path) {
+        this.name = name;
+        this.type = type;
+        this.optional = optional;
+        this.declared = declared;
+        this.path = path;
+        this.possible = Interval.parse(declared.possible());
+        this.valid = Interval.parse(declared.valid());
+    }
+
+    /** Returns the name. */
+    public String name() {
+        return name;
+    }
+
+    /** Returns the type: {@code double} for numbers, else the class of its values, an {@code Optional} taken off. */
+    public Class<?> type() {
+        return type;
+    }
+
+    /** Tells whether it is a plain number. */
+    public boolean isNumber() {
+        return type == double.class;
+    }
+
+    /** Tells whether it may be left out. */
+    public boolean isOptional() {
+        return optional || !declared.byDefault().isEmpty();
+    }
+
+    /** Returns the line for help and completion. */
+    public String doc() {
+        return declared.doc();
+    }
+
+    /** Returns the kind of number. */
+    public Kind kind() {
+        return declared.kind();
+    }
+
+    /** Returns all kinds of number that are accepted. */
+    public List<Kind> kinds() {
+        List<Kind> kinds = new ArrayList<>();
+        if (isNumber() || type == Stated.class || type == Breakdown.class) {
+            kinds.add(declared.kind());
+            kinds.addAll(List.of(declared.also()));
+        }
+        return kinds;
+    }
+
+    /** Returns what the number refers to. */
+    public Basis basis() {
+        return declared.basis();
+    }
+
+    /** Returns the default with its unit, empty when there is none. */
+    public String byDefault() {
+        return declared.byDefault();
+    }
+
+    /** Returns the interval outside which an input is impossible. */
+    public Interval possible() {
+        return possible;
+    }
+
+    /** Returns the method's valid interval. */
+    public Interval valid() {
+        return valid;
+    }
+
+    /** Returns the words that an argument of an enum type may have, nothing for other types. */
+    public List<String> choices() {
+        List<String> words = new ArrayList<>();
+        if (type.isEnum()) {
+            for (Object constant : type.getEnumConstants()) {
+                words.add(word(constant));
+            }
+        }
+        return words;
+    }
+
+    /** Returns the word that stands for an enum constant in the shell. */
+    static String word(Object constant) {
+        return ((Enum<?>) constant).name().toLowerCase(Locale.ROOT).replace('_', '-');
+    }
+
+    /** Returns the component's value in a record: a {@code Double}, an object, or null when it is left out. */
+    Object read(Object record) {
+        try {
+            Object value = record;
+            for (MethodHandle accessor : path) {
+                value = accessor.invoke(value);
+            }
+            return unwrapped(value);
+        } catch (Throwable e) {
+            throw new IllegalStateException("cannot read " + name, e);
+        }
+    }
+
+    private static Object unwrapped(Object value) {
+        if (value instanceof OptionalDouble number) {
+            return number.isPresent() ? (Object) number.getAsDouble() : null;
+        }
+        return value instanceof Optional<?> object ? object.orElse(null) : value;
+    }
+}

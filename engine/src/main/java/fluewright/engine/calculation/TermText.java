@@ -1,0 +1,35 @@
+package fluewright.engine.calculation;
+
+import fluewright.engine.quantity.Basis;
+import fluewright.engine.quantity.Kind;
+import fluewright.engine.quantity.UnitSystem;
+import java.util.Locale;
+import java.util.stream.Collectors;
+
+/** Terms in words, for help, completion and errors. */
+public final class TermText {
+
+    private TermText() {
+    }
+
+    /** Returns what an argument takes: {@code a share in pct, dry}, {@code a fuel}, {@code one of table, analysis}. */
+    public static String expects(Term term) {
+        if (term.type().isEnum()) {
+            return "one of " + String.join(", ", term.choices());
+        }
+        if (term.kinds().isEmpty()) {
+            return term.type() == boolean.class ? "true or false" : "a " + term.type().getSimpleName().toLowerCase(Locale.ROOT);
+        }
+        String kinds = term.kinds().stream().map(TermText::kind).collect(Collectors.joining(", or "));
+        return kinds + (term.basis() == Basis.NONE ? "" : ", " + term.basis().label());
+    }
+
+    private static String kind(Kind kind) {
+        return kind.isPure() ? kind.title() : kind.title() + " in " + kind.shown(UnitSystem.SI).symbol() + " (or " + other(kind) + ")";
+    }
+
+    private static String other(Kind kind) {
+        String us = kind.shown(UnitSystem.US).symbol();
+        return us.equals(kind.shown(UnitSystem.SI).symbol()) ? "ppm" : us;
+    }
+}
