@@ -30,6 +30,9 @@ public @interface Component {
     /** Further kinds that a {@link Stated} input accepts. */
     Kind[] also() default {};
 
+    /** The unit it is shown in whatever the unit system; empty: the kind's own. */
+    String shown() default "";
+
     /** What the number refers to. */
     Basis basis() default Basis.NONE;
 

@@ -73,6 +73,6 @@ public record Outcome(Declaration<?, ?> declaration, Record input, Record result
     }
 
     private static Value<?> value(Term term, double si, UnitSystem system) {
-        return Value.ofSi(si, term.kind().shown(system), term.basis());
+        return Value.ofSi(si, term.shown(system), term.basis());
     }
 }

@@ -2,6 +2,9 @@ package fluewright.engine.calculation;
 
 import fluewright.engine.quantity.Basis;
 import fluewright.engine.quantity.Kind;
+import fluewright.engine.quantity.NamedUnit;
+import fluewright.engine.quantity.UnitSystem;
+import fluewright.engine.quantity.Units;
 import java.lang.invoke.MethodHandle;
 import java.util.ArrayList;
 import java.util.List;
@@ -68,6 +71,11 @@ public final class Term {
             kinds.addAll(List.of(declared.also()));
         }
         return kinds;
+    }
+
+    /** Returns the unit that the number is shown in. */
+    public NamedUnit shown(UnitSystem system) {
+        return declared.shown().isEmpty() ? declared.kind().shown(system) : Units.of(declared.shown());
     }
 
     /** Returns what the number refers to. */

@@ -25,11 +25,11 @@ public final class TermText {
     }
 
     private static String kind(Kind kind) {
-        return kind.isPure() ? kind.title() : kind.title() + " in " + kind.shown(UnitSystem.SI).symbol() + " (or " + other(kind) + ")";
-    }
-
-    private static String other(Kind kind) {
+        if (kind.isPure()) {
+            return kind.title();
+        }
+        String si = kind.shown(UnitSystem.SI).symbol();
         String us = kind.shown(UnitSystem.US).symbol();
-        return us.equals(kind.shown(UnitSystem.SI).symbol()) ? "ppm" : us;
+        return kind.title() + " such as 1." + si + (us.equals(si) ? "" : " or 1." + us);
     }
 }

@@ -65,6 +65,9 @@ public enum EngineMessage implements Message {
     /** More carbon unburned than the fuel holds. */
     MORE_CARBON_THAN_FUEL("more carbon is unburned than the fuel holds"),
 
+    /** A fuel without the F-factor that is asked for. */
+    NO_F_FACTOR("this F-factor is not to be had"),
+
     /** An input outside the method's valid range. */
     OUTSIDE_VALID_RANGE("outside the valid range of the method"),
     /** A composition was scaled to 100 %. */
@@ -87,10 +90,6 @@ public enum EngineMessage implements Message {
     ILL_CONDITIONED("the O2 is close to that of air: the correction magnifies every error of the reading"),
     /** Moisture of the flue gas taken from the fuel's stoichiometry. */
     MOISTURE_COMPUTED("the moisture of the flue gas is computed from the fuel and dry air"),
-    /** Which F-factor was used. */
-    F_FACTOR("F-factor"),
-    /** How the oxygen of the correction is defined. */
-    O2_IN_AIR("oxygen of dry air in the correction"),
     /** A setting follows from the number: people may be hurt. */
     SETTING_CAUTION("before you set a burner by this number: carbon monoxide and unburned fuel can kill; verify with a "
             + "calibrated analyzer, follow the local codes, leave it to licensed service");

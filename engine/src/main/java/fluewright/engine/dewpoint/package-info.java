@@ -1,0 +1,2 @@
+/** Temperatures at which something condenses from the flue gas. */
+package fluewright.engine.dewpoint;
