@@ -7,6 +7,7 @@ import fluewright.engine.message.NearestName;
 import fluewright.engine.message.Note;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.engine.quantity.Value;
+import fluewright.engine.quantity.ValueText;
 import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -61,6 +62,24 @@ public record Outcome(Declaration<?, ?> declaration, Record input, Record result
                     .expected("one of " + String.join(", ", names())).nearest(NearestName.of(name, names())));
         }
         return shown(term, term.read(result), system);
+    }
+
+    /** Returns an input: a {@link Value} in the unit its kind is shown in, the object itself, or null when it was left out. */
+    public Object inputValue(Term term) {
+        Object value = term.read(input);
+        if (value instanceof Stated stated) {
+            return Value.ofSi(stated.value(), stated.kind().shown(UnitSystem.SI), stated.basis().or(term.basis()));
+        }
+        return value == null ? null : shown(term, value, UnitSystem.SI);
+    }
+
+    /** Tells whether an input has the value of its default. */
+    public boolean isDefault(Term term) {
+        Object value = term.read(input);
+        if (term.byDefault().isEmpty()) {
+            return false;
+        }
+        return term.isNumber() ? ValueText.parse(term.byDefault()).si() == (Double) value : Term.word(value).equals(term.byDefault());
     }
 
     private static Object shown(Term term, Object value, UnitSystem system) {

@@ -109,9 +109,9 @@ public final class Term {
         return words;
     }
 
-    /** Returns the word that stands for an enum constant in the shell. */
+    /** Returns the word that stands for a constant in the shell. */
     static String word(Object constant) {
-        return ((Enum<?>) constant).name().toLowerCase(Locale.ROOT).replace('_', '-');
+        return constant instanceof Enum<?> named ? named.name().toLowerCase(Locale.ROOT).replace('_', '-') : String.valueOf(constant);
     }
 
     /** Returns the component's value in a record: a {@code Double}, an object, or null when it is left out. */

@@ -26,7 +26,7 @@ public enum Basis {
     }
 
     /** Returns the more telling of two bases that agree. */
-    Basis or(Basis other) {
+    public Basis or(Basis other) {
         return this == NONE ? other : this;
     }
 }

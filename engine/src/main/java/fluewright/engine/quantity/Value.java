@@ -142,9 +142,8 @@ public final class Value<Q extends Quantity<Q>> implements Quantity<Q>, Comparab
         return ratio ? of(si() / other.si(), Units.of("1")) : of(number / other.number, unit.per(other.unit));
     }
 
-    /** Returns the value with its sign turned. */
+    /** Returns the value with its sign turned; in Groovy {@code -5.degC} is the negative of {@code 5.degC}. */
     public Value<Q> negative() {
-        requireNoScale("-");
         return same(-number);
     }
 

@@ -1,0 +1,2 @@
+/** The functions of the shell: fuels, calculations of the catalog, units and help. */
+package fluewright.repl.function;

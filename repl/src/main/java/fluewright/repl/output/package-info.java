@@ -1,0 +1,2 @@
+/** What the shell prints: tables for people, JSON lines for programs. */
+package fluewright.repl.output;
