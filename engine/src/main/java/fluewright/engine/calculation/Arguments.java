@@ -54,7 +54,7 @@ final class Arguments {
 
     private Object absent(Term term) {
         if (!term.byDefault().isEmpty()) {
-            return term.isNumber() ? (Object) ValueText.parse(term.byDefault()).si() : checked(term, term.byDefault());
+            return term.isNumber() ? (Object) term.defaultNumber() : checked(term, term.byDefault());
         }
         if (!term.isOptional()) {
             throw new InputException(EngineMessage.ARGUMENT_MISSING,

@@ -7,7 +7,6 @@ import fluewright.engine.message.NearestName;
 import fluewright.engine.message.Note;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.engine.quantity.Value;
-import fluewright.engine.quantity.ValueText;
 import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -79,7 +78,7 @@ public record Outcome(Declaration<?, ?> declaration, Record input, Record result
         if (term.byDefault().isEmpty()) {
             return false;
         }
-        return term.isNumber() ? ValueText.parse(term.byDefault()).si() == (Double) value : Term.word(value).equals(term.byDefault());
+        return term.isNumber() ? term.defaultNumber() == (Double) value : Term.word(value).equals(term.byDefault());
     }
 
     private static Object shown(Term term, Object value, UnitSystem system) {

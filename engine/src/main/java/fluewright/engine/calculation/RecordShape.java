@@ -2,8 +2,6 @@ package fluewright.engine.calculation;
 
 import java.lang.invoke.MethodHandle;
 import java.lang.invoke.MethodHandles;
-import java.lang.reflect.Constructor;
-import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
@@ -24,9 +22,11 @@ public final class RecordShape<T extends Record> {
 
     private final Class<T> type;
     private final Map<String, Term> terms = new LinkedHashMap<>();
+    private final RecordMaker maker;
 
     private RecordShape(Class<T> type) {
         this.type = type;
+        this.maker = RecordMaker.of(type);
     }
 
     static <T extends Record> RecordShape<T> of(Class<T> type) {
@@ -65,20 +65,6 @@ public final class RecordShape<T extends Record> {
         }
     }
 
-    private static boolean isOptional(Class<?> type) {
-        return type == OptionalDouble.class || type == Optional.class;
-    }
-
-    private static Class<?> valueType(RecordComponent part) {
-        if (part.getType() == OptionalDouble.class) {
-            return double.class;
-        }
-        if (part.getType() == Optional.class) {
-            return (Class<?>) ((ParameterizedType) part.getGenericType()).getActualTypeArguments()[0];
-        }
-        return part.getType();
-    }
-
     /** Returns the components in the order of the record. */
     public Collection<Term> terms() {
         return terms.values();
@@ -96,36 +82,20 @@ public final class RecordShape<T extends Record> {
 
     /** Makes the record of its components' values, in the order of {@link #terms()}; null stands for left out. */
     T make(Iterator<Object> values) {
-        return type.cast(make(type, values));
+        return type.cast(maker.make(values));
     }
 
-    private static Object make(Class<?> record, Iterator<Object> values) {
-        RecordComponent[] parts = record.getRecordComponents();
-        Object[] arguments = new Object[parts.length];
-        Class<?>[] types = new Class<?>[parts.length];
-        for (int i = 0; i < parts.length; i++) {
-            types[i] = parts[i].getType();
-            arguments[i] = parts[i].isAnnotationPresent(Component.class) ? wrapped(types[i], values.next()) : make(types[i], values);
-        }
-        return construct(record, types, arguments);
+    private static boolean isOptional(Class<?> type) {
+        return type == OptionalDouble.class || type == Optional.class;
     }
 
-    private static Object wrapped(Class<?> type, Object value) {
-        if (type == OptionalDouble.class) {
-            return value == null ? OptionalDouble.empty() : OptionalDouble.of((Double) value);
+    private static Class<?> valueType(RecordComponent part) {
+        if (part.getType() == OptionalDouble.class) {
+            return double.class;
         }
-        return type == Optional.class ? Optional.ofNullable(value) : value;
-    }
-
-    private static Object construct(Class<?> record, Class<?>[] types, Object[] arguments) {
-        try {
-            Constructor<?> constructor = record.getDeclaredConstructor(types);
-            constructor.setAccessible(true);
-            return constructor.newInstance(arguments);
-        } catch (InvocationTargetException e) {
-            throw e.getCause() instanceof RuntimeException cause ? cause : new IllegalStateException(e.getCause());
-        } catch (ReflectiveOperationException e) {
-            throw new IllegalStateException("cannot make " + record.getName(), e);
+        if (part.getType() == Optional.class) {
+            return (Class<?>) ((ParameterizedType) part.getGenericType()).getActualTypeArguments()[0];
         }
+        return part.getType();
     }
 }

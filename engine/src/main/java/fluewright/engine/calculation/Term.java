@@ -5,6 +5,7 @@ import fluewright.engine.quantity.Kind;
 import fluewright.engine.quantity.NamedUnit;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.engine.quantity.Units;
+import fluewright.engine.quantity.ValueText;
 import java.lang.invoke.MethodHandle;
 import java.util.ArrayList;
 import java.util.List;
@@ -22,6 +23,7 @@ public final class Term {
     private final List<MethodHandle> path;
     private final Interval possible;
     private final Interval valid;
+    private final double defaultNumber;
 
     Term(String name, Class<?> type, boolean optional, Component declared, List<MethodHandle> path) {
         this.name = name;
@@ -31,6 +33,7 @@ public final class Term {
         this.path = path;
         this.possible = Interval.parse(declared.possible());
         this.valid = Interval.parse(declared.valid());
+        this.defaultNumber = isNumber() && !byDefault().isEmpty() ? ValueText.parse(byDefault()).si() : Double.NaN;
     }
 
     /** Returns the name. */
@@ -86,6 +89,11 @@ public final class Term {
     /** Returns the default with its unit, empty when there is none. */
     public String byDefault() {
         return declared.byDefault();
+    }
+
+    /** Returns the default of a number in the coherent SI unit; NaN when there is none. */
+    double defaultNumber() {
+        return defaultNumber;
     }
 
     /** Returns the interval outside which an input is impossible. */

@@ -42,7 +42,31 @@ public enum Kind {
     /** Mass of a pollutant per energy [kg/J]. */
     EMISSION_PER_ENERGY("a mass per energy", "kg/J", "g/GJ", "lb/MMBtu"),
     /** Mass of a pollutant per amount of gas [kg/mol], shown per volume at a stated state. */
-    MASS_PER_GAS("a mass per gas volume", "kg/mol", "mg/Nm3", "mg/m3at20");
+    MASS_PER_GAS("a mass per gas volume", "kg/mol", "mg/Nm3", "mg/m3at20"),
+    /** Difference of two pressures, such as a draft [Pa]. */
+    PRESSURE_DIFFERENCE("a difference of pressures", "Pa", "Pa", "inH2O"),
+    /** Length [m]. */
+    LENGTH("a length", "m", "m", "ft"),
+    /** Area [m2]. */
+    AREA("an area", "m2", "m2", "ft2"),
+    /** Volume as it stands [m3]. */
+    VOLUME("a volume", "m3", "m3", "ft3"),
+    /** Duration [s]. */
+    DURATION("a duration", "s", "h", "h"),
+    /** Velocity [m/s]. */
+    VELOCITY("a velocity", "m/s", "m/s", "ft/s"),
+    /** Mass [kg]. */
+    MASS("a mass", "kg", "kg", "lb"),
+    /** Mass flow [kg/s]. */
+    MASS_FLOW("a mass flow", "kg/s", "kg/h", "lb/h"),
+    /** Volume flow as it stands [m3/s]. */
+    VOLUME_FLOW("a volume flow", "m3/s", "m3/h", "ft3/min"),
+    /** Flow of gas as an amount [mol/s], shown as a volume flow at a stated state. */
+    GAS_FLOW("a gas flow", "mol/s", "Nm3/h", "scf60/h"),
+    /** Energy [J]. */
+    ENERGY("an energy", "J", "GJ", "MMBtu"),
+    /** Power, such as a firing rate [W]. */
+    POWER("a power", "W", "kW", "MMBtu/h");
 
     private final String title;
     private final String si;
@@ -73,12 +97,11 @@ public enum Kind {
 
     /** Tells whether a number in this unit can be of this kind. */
     public boolean accepts(NamedUnit unit) {
-        boolean difference = this == TEMPERATURE_DIFFERENCE;
-        return unit.hasDimensionOf(si()) && (this == PURE || si.equals("1") || difference == unit.isDifference());
+        return unit.hasDimensionOf(si()) && (this == TEMPERATURE_DIFFERENCE) == unit.isDifference();
     }
 
-    /** Tells whether a number of this kind needs no unit. */
+    /** Tells whether a number of this kind needs no unit: a pure number, or a ratio that is the same in all units. */
     public boolean isPure() {
-        return this == PURE;
+        return this == PURE || this == MASS_RATIO || this == VOLUME_RATIO;
     }
 }

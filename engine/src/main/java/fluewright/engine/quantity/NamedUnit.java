@@ -1,5 +1,6 @@
 package fluewright.engine.quantity;
 
+import javax.measure.Dimension;
 import javax.measure.Quantity;
 import javax.measure.Unit;
 import javax.measure.UnitConverter;
@@ -16,12 +17,14 @@ public final class NamedUnit {
     private final Basis basis;
     private final double factor;
     private final double offset;
+    private final Dimension dimension;
 
     NamedUnit(String symbol, Unit<?> unit, Quantity.Scale scale, Basis basis) {
         this.symbol = symbol;
         this.unit = unit;
         this.scale = scale;
         this.basis = basis;
+        this.dimension = unit.getDimension();
         UnitConverter toSystem = toSystem(unit);
         this.offset = toSystem.convert(0.0);
         this.factor = offset == 0 ? toSystem.convert(1.0) : (toSystem.convert(1000.0) - offset) / 1000;
@@ -68,7 +71,7 @@ public final class NamedUnit {
 
     /** Tells whether both units measure the same dimension. */
     public boolean hasDimensionOf(NamedUnit other) {
-        return this == other || unit.getDimension().equals(other.unit.getDimension());
+        return this == other || dimension.equals(other.dimension);
     }
 
     /** Returns the number in coherent SI units. */
