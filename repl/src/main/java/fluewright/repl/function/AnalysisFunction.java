@@ -5,6 +5,7 @@ import fluewright.engine.fuel.FuelBuilder;
 import fluewright.engine.fuel.Phase;
 import fluewright.engine.fuel.UltimateAnalysis;
 import fluewright.engine.quantity.Kind;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
@@ -60,6 +61,13 @@ final class AnalysisFunction implements ShellFunction {
     public List<String> remarks() {
         return List.of("All other names are shares: " + String.join(", ", UltimateAnalysis.NAMES) + ". H and O are those of the",
                 "fuel itself, without the moisture. Without hhv the heating value is estimated after Channiwala and Parikh.");
+    }
+
+    @Override
+    public Map<String, String> openNames() {
+        Map<String, String> names = new LinkedHashMap<>();
+        UltimateAnalysis.NAMES.forEach(name -> names.put(name, "share by mass"));
+        return names;
     }
 
     @Override

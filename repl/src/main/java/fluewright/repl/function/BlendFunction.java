@@ -43,8 +43,10 @@ final class BlendFunction implements ShellFunction {
     }
 
     @Override
-    public boolean takesFuel() {
-        return true;
+    public Map<String, String> openNames() {
+        Map<String, String> names = new LinkedHashMap<>();
+        workbench.fuels().ids().forEach(id -> names.put(id.contains("-") ? "'" + id + "'" : id, "fuel"));
+        return names;
     }
 
     @Override

@@ -32,7 +32,7 @@ final class CalculationFunction implements ShellFunction {
 
     @Override
     public List<ArgumentDoc> arguments() {
-        return declaration.input().terms().stream().map(term -> new ArgumentDoc(term.name(), TermText.expects(term), term.doc(),
+        return declaration.input().terms().stream().map(term -> new ArgumentDoc(term.name(), TermText.expects(term), plainUnit(term), term.doc(),
                 term.byDefault(), term.choices(), term.isOptional())).toList();
     }
 
@@ -53,6 +53,10 @@ final class CalculationFunction implements ShellFunction {
             declaration.sources().forEach(source -> lines.add("  " + source));
         }
         return lines;
+    }
+
+    private String plainUnit(Term term) {
+        return term.kinds().isEmpty() || term.kind().isPure() ? "" : term.shown(workbench.shown()).symbol();
     }
 
     private String unit(Term term) {

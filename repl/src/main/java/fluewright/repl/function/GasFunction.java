@@ -2,10 +2,12 @@ package fluewright.repl.function;
 
 import fluewright.engine.fuel.Blend;
 import fluewright.engine.fuel.FuelBuilder;
+import fluewright.engine.fuel.GasComponents;
 import fluewright.engine.message.Detail;
 import fluewright.engine.message.EngineMessage;
 import fluewright.engine.message.InputException;
 import fluewright.engine.quantity.Kind;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
@@ -46,6 +48,17 @@ final class GasFunction implements ShellFunction {
     public List<String> remarks() {
         return List.of("All other names are components with their shares: symbols of ISO 6976 such as CH4, C2H6, nC4H10,",
                 "iC4H10, CO2, N2, H2, CO, H2S. Shares make 100 % within 1 %; they are scaled, and a remark says so.");
+    }
+
+    @Override
+    public Map<String, String> openNames() {
+        Map<String, String> names = new LinkedHashMap<>();
+        GasComponents.all().forEach((symbol, component) -> names.put(typed(symbol), component.title()));
+        return names;
+    }
+
+    private static String typed(String symbol) {
+        return symbol.chars().allMatch(Character::isJavaIdentifierPart) ? symbol : "'" + symbol + "'";
     }
 
     @Override

@@ -23,6 +23,11 @@ public interface ShellFunction {
         return List.of();
     }
 
+    /** Returns names that its open arguments may have, with a word about each, such as the components of a gas. */
+    default Map<String, String> openNames() {
+        return Map.of();
+    }
+
     /** Tells whether its first unnamed value is a fuel, whose id completion offers. */
     default boolean takesFuel() {
         return false;

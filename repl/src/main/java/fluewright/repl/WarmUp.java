@@ -1,0 +1,28 @@
+package fluewright.repl;
+
+import fluewright.engine.message.InputException;
+import fluewright.engine.quantity.Value;
+import fluewright.repl.function.ShellFunction;
+import fluewright.repl.function.Workbench;
+import fluewright.repl.output.Printer;
+import java.util.List;
+import java.util.Map;
+
+/** Does once what the first results will need, while the user still reads the prompt. */
+final class WarmUp {
+
+    private WarmUp() {
+    }
+
+    static void run(Workbench workbench) {
+        try {
+            Map<Object, Object> reading = Map.of("o2", Value.of(3, "pct"), "stack", Value.of(180, "degC"));
+            Object losses = workbench.function("losses").orElseThrow().call(List.of("natural-gas"), reading);
+            new Printer(workbench::shown).lines(losses, 80);
+            workbench.functions().forEach(ShellFunction::arguments);
+            workbench.fuels().ids().forEach(workbench.fuels()::get);
+        } catch (InputException usersOwnFile) {
+            // A faulty file of the user's is told when it is asked for, not now.
+        }
+    }
+}

@@ -1,0 +1,53 @@
+package fluewright.repl;
+
+import fluewright.repl.editor.Vocabulary;
+import fluewright.repl.function.Workbench;
+import fluewright.repl.language.Names;
+import fluewright.repl.language.ResultSink;
+import fluewright.repl.output.JsonLine;
+import fluewright.repl.output.Printer;
+import java.util.Collections;
+import java.util.Map;
+
+/** The session of a workbench. The workbench is made at the first need, so that a prompt stands before it. */
+final class WorkbenchSession implements Session {
+
+    private final Options options;
+    private final Output output;
+    private volatile Map<?, ?> variables = Collections.emptyMap();
+    private Workbench workbench;
+
+    WorkbenchSession(Options options, Output output) {
+        this.options = options;
+        this.output = output;
+    }
+
+    private synchronized Workbench workbench() {
+        if (workbench == null) {
+            workbench = new Workbench(PluginFolder.loader(options.plugins()), name -> variables.get(name));
+        }
+        return workbench;
+    }
+
+    @Override
+    public Names names() {
+        return new WorkbenchNames(this::workbench);
+    }
+
+    @Override
+    public ResultSink sink() {
+        Printer printer = new Printer(() -> workbench().shown());
+        return options.json() ? new JsonSink(new JsonLine(() -> workbench().shown()), output) : new TextSink(printer, output);
+    }
+
+    @Override
+    public Vocabulary vocabulary(Map<?, ?> sessionVariables) {
+        this.variables = sessionVariables;
+        return new WorkbenchVocabulary(this::workbench, sessionVariables, new Printer(() -> workbench().shown()));
+    }
+
+    @Override
+    public void warmUp() {
+        WarmUp.run(workbench());
+    }
+}
