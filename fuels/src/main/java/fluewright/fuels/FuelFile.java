@@ -71,7 +71,8 @@ public final class FuelFile {
     public static Fuel read(Path file) {
         String name = file.getFileName() == null ? "" : file.getFileName().toString();
         if (!name.endsWith(FuelId.SUFFIX)) {
-            throw new InputException(FuelFileMessage.WRONG_FILE_NAME, Detail.at(file.toString()).found(name).expected("a name such as my-gas.yaml"));
+            throw new InputException(FuelFileMessage.WRONG_FILE_NAME, Detail.at(file.toString()).found(name)
+                    .expected("a name such as my-gas.yaml"));
         }
         return parse(bytes(file), file.toString(), name.substring(0, name.length() - FuelId.SUFFIX.length()));
     }
@@ -91,7 +92,8 @@ public final class FuelFile {
     private static byte[] bytes(InputStream stream, String place) throws IOException {
         byte[] bytes = stream.readNBytes(LIMIT + 1);
         if (bytes.length > LIMIT) {
-            throw new InputException(FuelFileMessage.TOO_LARGE, Detail.at(place).found("more than 1 MB").expected("a file of at most 1 MB"));
+            throw new InputException(FuelFileMessage.TOO_LARGE, Detail.at(place).found("more than 1 MB")
+                    .expected("a file of at most 1 MB"));
         }
         return bytes;
     }

@@ -36,7 +36,8 @@ final class YamlDocument {
 
     private YamlDocument(String file) {
         this.file = file;
-        this.settings = LoadSettings.builder().setLabel(file).setUseMarks(true).build();
+        // A list as a key is refused later, with its place; the parser would refuse it without one.
+        this.settings = LoadSettings.builder().setLabel(file).setAllowNonScalarKeys(true).build();
     }
 
     /**
@@ -77,7 +78,8 @@ final class YamlDocument {
             throw at.error(FuelFileMessage.SEVERAL_DOCUMENTS, "a second document", "one document");
         }
         if (event instanceof AliasEvent || event instanceof NodeEvent node && node.getAnchor().isPresent()) {
-            throw at.error(FuelFileMessage.ALIAS, "an anchor (&) or alias (*)", "the value itself; a text that begins with & or * in quotes");
+            throw at.error(FuelFileMessage.ALIAS, "an anchor (&) or alias (*)",
+                    "the value itself; a text that begins with & or * in quotes");
         }
         depth += event instanceof CollectionStartEvent ? 1 : event instanceof CollectionEndEvent ? -1 : 0;
         if (depth > DEPTH) {
