@@ -1,6 +1,5 @@
 package fluewright.repl;
 
-import fluewright.engine.message.InputException;
 import fluewright.engine.quantity.Value;
 import fluewright.repl.function.ShellFunction;
 import fluewright.repl.function.Workbench;
@@ -15,14 +14,10 @@ final class WarmUp {
     }
 
     static void run(Workbench workbench) {
-        try {
-            Map<Object, Object> reading = Map.of("o2", Value.of(3, "pct"), "stack", Value.of(180, "degC"));
-            Object losses = workbench.function("losses").orElseThrow().call(List.of("natural-gas"), reading);
-            new Printer(workbench::shown).lines(losses, 80);
-            workbench.functions().forEach(ShellFunction::arguments);
-            workbench.fuels().ids().forEach(workbench.fuels()::get);
-        } catch (InputException usersOwnFile) {
-            // A faulty file of the user's is told when it is asked for, not now.
-        }
+        Map<Object, Object> reading = Map.of("o2", Value.of(3, "pct"), "stack", Value.of(180, "degC"));
+        Object losses = workbench.function("losses").orElseThrow().call(List.of("methane"), reading);
+        new Printer(workbench::shown).lines(losses, 80);
+        workbench.functions().forEach(ShellFunction::arguments);
+        workbench.fuelIds().forEach(workbench::fuelEntry);
     }
 }

@@ -61,16 +61,7 @@ final class WorkbenchVocabulary implements Vocabulary {
     @Override
     public List<Word> texts(String function) {
         boolean fuel = workbench.get().function(function).map(ShellFunction::takesFuel).orElse(false);
-        return fuel ? workbench.get().fuels().ids().stream().map(this::fuelWord).toList() : List.of();
-    }
-
-    /** A user's file that cannot be read still has a name; the error comes when it is used. */
-    private Word fuelWord(String id) {
-        try {
-            return new Word(id, workbench.get().fuels().get(id).title());
-        } catch (RuntimeException unreadable) {
-            return new Word(id, "cannot be read");
-        }
+        return fuel ? workbench.get().fuelIds().stream().map(id -> new Word(id, workbench.get().fuelEntry(id).title())).toList() : List.of();
     }
 
     @Override

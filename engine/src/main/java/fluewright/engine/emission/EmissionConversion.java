@@ -63,7 +63,7 @@ final class EmissionConversion {
         double molarMass = pollutant.molarMass();
         double fd = factors == null ? Double.NaN : factors.dry();
         boolean airFree = pollutant == Pollutant.CO;
-        return new CorrectEmission.Result(pollutant.name() + " as " + pollutant.countedAs(),
+        return new CorrectEmission.Result(pollutant.label(),
                 known(measured), known(stated.basis() == Basis.WET ? stated.value() : measured * (1 - moisture)),
                 known(measured * molarMass), known(oxygen), input.to(), ofAir, known(factor), known(corrected),
                 known(corrected * molarMass), known(airFree ? measured * ofAir / (ofAir - oxygen) : Double.NaN),

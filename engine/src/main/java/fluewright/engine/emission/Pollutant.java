@@ -5,21 +5,23 @@ import fluewright.engine.species.SpeciesTable;
 /** The pollutants whose amounts are converted. */
 public enum Pollutant {
     /** Nitrogen oxides, all counted as NO2, as the rules ask. */
-    NOX("NO2"),
+    NOX("NOx", "NO2"),
     /** Carbon monoxide. */
-    CO("CO"),
+    CO("CO", "CO"),
     /** Sulfur dioxide. */
-    SO2("SO2");
+    SO2("SO2", "SO2");
 
+    private final String label;
     private final String countedAs;
 
-    Pollutant(String countedAs) {
+    Pollutant(String label, String countedAs) {
+        this.label = label;
         this.countedAs = countedAs;
     }
 
-    /** Returns the species it is counted as. */
-    public String countedAs() {
-        return countedAs;
+    /** Returns the name for people, and what it is counted as where that is something else. */
+    public String label() {
+        return label.equals(countedAs) ? label : label + " as " + countedAs;
     }
 
     /** Returns the molar mass it is counted with [kg/mol]. */

@@ -45,7 +45,7 @@ final class BlendFunction implements ShellFunction {
     @Override
     public Map<String, String> openNames() {
         Map<String, String> names = new LinkedHashMap<>();
-        workbench.fuels().ids().forEach(id -> names.put(id.contains("-") ? "'" + id + "'" : id, "fuel"));
+        workbench.fuelIds().forEach(id -> names.put(id.contains("-") ? "'" + id + "'" : id, "fuel"));
         return names;
     }
 

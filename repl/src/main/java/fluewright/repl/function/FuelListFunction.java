@@ -1,6 +1,5 @@
 package fluewright.repl.function;
 
-import fluewright.engine.fuel.Fuel;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -45,11 +44,11 @@ final class FuelListFunction implements ShellFunction {
         Unnamed.noNames(name(), named);
         Unnamed.atMost(name(), unnamed, 1);
         String word = unnamed.isEmpty() ? "" : unnamed.get(0).toString().toLowerCase(Locale.ROOT);
-        List<Fuel> found = new ArrayList<>();
-        for (String id : workbench.fuels().ids()) {
-            Fuel fuel = workbench.fuels().get(id);
-            if ((fuel.id() + " " + fuel.title() + " " + fuel.phase().label()).toLowerCase(Locale.ROOT).contains(word)) {
-                found.add(fuel);
+        List<FuelEntry> found = new ArrayList<>();
+        for (String id : workbench.fuelIds()) {
+            FuelEntry entry = workbench.fuelEntry(id);
+            if ((entry.id() + " " + entry.title() + " " + entry.phase()).toLowerCase(Locale.ROOT).contains(word)) {
+                found.add(entry);
             }
         }
         return found;

@@ -4,6 +4,7 @@ import fluewright.engine.calculation.Catalog;
 import fluewright.engine.calculation.Reading;
 import fluewright.engine.fuel.Fuel;
 import fluewright.engine.fuel.FuelLibrary;
+import fluewright.engine.message.InputException;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.fuels.FuelFile;
 import java.nio.file.Path;
@@ -59,9 +60,19 @@ public final class Workbench implements Reading {
         return Optional.ofNullable(functions.get(name));
     }
 
-    /** Returns the library of fuels. */
-    public FuelLibrary fuels() {
-        return fuels;
+    /** Returns the ids of all fuels. */
+    public Collection<String> fuelIds() {
+        return fuels.ids();
+    }
+
+    /** Returns a fuel as it stands in lists; a file of the user's that cannot be read does not spoil the list. */
+    public FuelEntry fuelEntry(String id) {
+        try {
+            Fuel fuel = fuels.get(id);
+            return new FuelEntry(id, fuel.phase().label(), fuel.title());
+        } catch (InputException unreadable) {
+            return new FuelEntry(id, "", unreadable.getMessage());
+        }
     }
 
     /** Returns the units that results are shown in. */

@@ -6,6 +6,7 @@ import fluewright.engine.quantity.Basis;
 import fluewright.engine.quantity.Kind;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.engine.quantity.Value;
+import fluewright.repl.function.FuelEntry;
 import fluewright.repl.function.FunctionHandle;
 import fluewright.repl.function.HelpText;
 import fluewright.repl.function.ResultView;
@@ -46,6 +47,9 @@ public final class JsonLine {
         }
         if (value instanceof Value<?> number) {
             return quantity(number);
+        }
+        if (value instanceof FuelEntry entry) {
+            return Map.of("fuel", entry.id(), "phase", entry.phase(), "title", entry.title());
         }
         if (value instanceof HelpText text) {
             return Map.of("text", text.lines());

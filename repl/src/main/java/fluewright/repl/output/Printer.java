@@ -4,6 +4,7 @@ import fluewright.engine.fuel.Fuel;
 import fluewright.engine.message.Note;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.engine.quantity.Value;
+import fluewright.repl.function.FuelEntry;
 import fluewright.repl.function.FunctionHandle;
 import fluewright.repl.function.HelpText;
 import fluewright.repl.function.ResultView;
@@ -80,7 +81,7 @@ public final class Printer {
     }
 
     private String listed(Object part) {
-        return part instanceof Fuel fuel ? String.format("%-22s %-7s %s", fuel.id(), fuel.phase().label(), fuel.title()) : oneLine(part);
+        return part instanceof FuelEntry fuel ? String.format("%-22s %-7s %s", fuel.id(), fuel.phase(), fuel.title()) : oneLine(part);
     }
 
     private List<String> notes(List<Note> notes) {
