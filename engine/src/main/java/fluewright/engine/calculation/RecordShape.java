@@ -1,7 +1,6 @@
 package fluewright.engine.calculation;
 
-import java.lang.invoke.MethodHandle;
-import java.lang.invoke.MethodHandles;
+import java.lang.reflect.Method;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
@@ -35,9 +34,9 @@ public final class RecordShape<T extends Record> {
         return shape;
     }
 
-    private void collect(Class<?> record, List<MethodHandle> outer) {
+    private void collect(Class<?> record, List<Method> outer) {
         for (RecordComponent part : record.getRecordComponents()) {
-            List<MethodHandle> path = new ArrayList<>(outer);
+            List<Method> path = new ArrayList<>(outer);
             path.add(accessor(part));
             Component declared = part.getAnnotation(Component.class);
             if (declared != null) {
@@ -56,13 +55,9 @@ public final class RecordShape<T extends Record> {
         }
     }
 
-    private static MethodHandle accessor(RecordComponent part) {
-        try {
-            part.getAccessor().setAccessible(true);
-            return MethodHandles.lookup().unreflect(part.getAccessor());
-        } catch (IllegalAccessException e) {
-            throw new IllegalStateException(part.getDeclaringRecord().getName() + " must be public", e);
-        }
+    private static Method accessor(RecordComponent part) {
+        part.getAccessor().setAccessible(true);
+        return part.getAccessor();
     }
 
     /** Returns the components in the order of the record. */

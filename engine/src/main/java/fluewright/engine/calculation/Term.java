@@ -6,7 +6,7 @@ import fluewright.engine.quantity.NamedUnit;
 import fluewright.engine.quantity.UnitSystem;
 import fluewright.engine.quantity.Units;
 import fluewright.engine.quantity.ValueText;
-import java.lang.invoke.MethodHandle;
+import java.lang.reflect.Method;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -20,12 +20,12 @@ public final class Term {
     private final Class<?> type;
     private final boolean optional;
     private final Component declared;
-    private final List<MethodHandle> path;
+    private final List<Method> path;
     private final Interval possible;
     private final Interval valid;
     private final double defaultNumber;
 
-    Term(String name, Class<?> type, boolean optional, Component declared, List<MethodHandle> path) {
+    Term(String name, Class<?> type, boolean optional, Component declared, List<Method> path) {
         this.name = name;
         this.type = type;
         this.optional = optional;
@@ -126,11 +126,11 @@ public final class Term {
     Object read(Object record) {
         try {
             Object value = record;
-            for (MethodHandle accessor : path) {
+            for (Method accessor : path) {
                 value = accessor.invoke(value);
             }
             return unwrapped(value);
-        } catch (Throwable e) {
+        } catch (ReflectiveOperationException e) {
             throw new IllegalStateException("cannot read " + name, e);
         }
     }
