@@ -69,7 +69,8 @@ class DeclarationTest {
         declaration.input().terms().stream().filter(Term::isNumber).filter(term -> !term.byDefault().isEmpty()).forEach(term -> {
             var value = ValueText.parse(term.byDefault());
             assertTrue(term.kind().accepts(value.named()), () -> declaration.name() + "." + term.name());
-            assertTrue(term.possible().contains(value.si()) && term.valid().contains(value.si()), () -> declaration.name() + "." + term.name());
+            assertTrue(term.possible().contains(value.si()) && term.valid().contains(value.si()),
+                    () -> declaration.name() + "." + term.name());
         });
     }
 
@@ -77,7 +78,8 @@ class DeclarationTest {
     @MethodSource("declarations")
     void shown_units_are_of_their_kind(Declaration<?, ?> declaration) {
         components(declaration).filter(term -> !term.kinds().isEmpty()).forEach(term -> Stream.of(UnitSystem.values())
-                .forEach(system -> assertTrue(term.kind().accepts(Units.of(term.shown(system).symbol())), () -> declaration.name() + "." + term.name())));
+                .forEach(system -> assertTrue(term.kind().accepts(Units.of(term.shown(system).symbol())),
+                        () -> declaration.name() + "." + term.name())));
     }
 
     private static Stream<Term> components(Declaration<?, ?> declaration) {

@@ -48,12 +48,21 @@ class NoteTest {
         assertFalse(has(Bench.run("correct", "nox", "5 ppm", "at", "10 %", "to", "3 %"), EngineMessage.ILL_CONDITIONED));
     }
 
+    /** Equation 19-7, both readings wet, takes no moisture; a wet O2 with a fuel takes that of the fuel. */
+    @Test
+    void computed_moisture_is_named_where_it_was_computed() {
+        assertTrue(has(Bench.run("correct", TestFuels.METHANE, "nox", "30 ppmvw", "at", "3 %"), EngineMessage.MOISTURE_COMPUTED));
+        assertFalse(has(Bench.run("correct", TestFuels.METHANE, "nox", "30 ppmvw", "atCo2Wet", "9 %"), EngineMessage.MOISTURE_COMPUTED));
+        assertFalse(has(Bench.run("correct", TestFuels.METHANE, "nox", "30 ppmvd", "at", "3 %"), EngineMessage.MOISTURE_COMPUTED));
+    }
+
     @Test
     void estimates_say_so() {
         assertTrue(has(Bench.run("properties", TestFuels.BITUMINOUS_COAL), EngineMessage.HEATING_VALUE_ESTIMATED));
         assertFalse(has(Bench.run("properties", TestFuels.OIL_6), EngineMessage.HEATING_VALUE_ESTIMATED));
         assertTrue(has(Bench.run("properties", TestFuels.solid("C 87 H 12.6 S 0.4", 30e6)), EngineMessage.HEATING_VALUE_CONTRADICTS));
-        assertTrue(has(Bench.run("properties", FuelBuilder.gas("dme", Map.of("CH3OCH3", 1.0), false).build()), EngineMessage.NOT_IN_ISO_6976));
+        assertTrue(has(Bench.run("properties", FuelBuilder.gas("dme", Map.of("CH3OCH3", 1.0), false).build()),
+                EngineMessage.NOT_IN_ISO_6976));
     }
 
     @Test

@@ -58,7 +58,8 @@ class RefusalTest {
     /** A temperature and a difference of temperatures are kept apart, both ways. */
     @Test
     void a_difference_is_no_temperature() {
-        assertEquals("180 deltaC", refused(EngineMessage.WRONG_UNIT, () -> Bench.run("losses", GAS, "stack", "180 deltaC")).detail().found());
+        assertEquals("180 deltaC", refused(EngineMessage.WRONG_UNIT, () -> Bench.run("losses", GAS,
+                "stack", "180 deltaC")).detail().found());
         Value<?> hot = Value.of(180, "degC");
         refused(EngineMessage.UNITS_DO_NOT_FIT, () -> hot.plus(hot));
         refused(EngineMessage.UNITS_DO_NOT_FIT, () -> Value.of(10, "deltaC").minus(hot));
@@ -126,11 +127,13 @@ class RefusalTest {
 
     @Test
     void what_excludes_one_another_is_refused() {
-        assertEquals("lambda and o2", refused(EngineMessage.ONE_OF, () -> Bench.run("burn", GAS, "o2", "3 %", "lambda", "1.1")).detail().found());
+        assertEquals("lambda and o2", refused(EngineMessage.ONE_OF, () -> Bench.run("burn", GAS, "o2", "3 %",
+                "lambda", "1.1")).detail().found());
         refused(EngineMessage.ONE_OF, () -> Bench.run("correct", "nox", "30 ppm", "co", "30 ppm", "at", "3 %"));
         refused(EngineMessage.ONE_OF, () -> Bench.run("correct", "nox", "30 ppm", "at", "3 %", "atWet", "3 %"));
         refused(EngineMessage.NOT_BOTH, () -> Bench.run("burn", GAS, "o2", "3 %", "humidity", "60 %", "humidityRatio", "0.01 kg/kg"));
-        refused(EngineMessage.NOT_BOTH, () -> Bench.run("burn", TestFuels.BITUMINOUS_COAL, "o2", "3 %", "carbonInAsh", "5 %", "unburnedCarbon", "1 %"));
+        refused(EngineMessage.NOT_BOTH, () -> Bench.run("burn", TestFuels.BITUMINOUS_COAL, "o2", "3 %", "carbonInAsh", "5 %",
+                "unburnedCarbon", "1 %"));
     }
 
     @Test
@@ -158,7 +161,8 @@ class RefusalTest {
     /** The largest CO2 of methane is 11.74 % with the air of CIPM-2007, that of hydrogen the air's own; air alone has 0.04 %. */
     @Test
     void carbon_dioxide_is_at_most_its_maximum() {
-        assertEquals("12 %", refused(EngineMessage.CO2_ABOVE_MAXIMUM, () -> Bench.run("burn", TestFuels.METHANE, "co2", "12 %")).detail().found());
+        assertEquals("12 %", refused(EngineMessage.CO2_ABOVE_MAXIMUM, () -> Bench.run("burn", TestFuels.METHANE,
+                "co2", "12 %")).detail().found());
         Bench.run("burn", TestFuels.METHANE, "co2", "11.7 %");
         refused(EngineMessage.CO2_ABOVE_MAXIMUM, () -> Bench.run("burn", TestFuels.HYDROGEN, "co2", "5 %"));
         refused(EngineMessage.READING_CONTRADICTS, () -> Bench.run("burn", TestFuels.METHANE, "co2", "0.01 %"));
@@ -171,11 +175,21 @@ class RefusalTest {
         Bench.run("burn", GAS, argument, value, "co", "2.5 %");
     }
 
+    /** Hydrogen gives no CO; methane at 3 % O2 has too little carbon for 15 %; neither is a lack of air. */
+    @ParameterizedTest
+    @CsvSource({"H2 100, 100 ppm", "H2 100, 1000 ppm", "CH4 100, 15 %"})
+    void there_is_no_more_carbon_monoxide_than_the_fuel_has_carbon_for(String fuel, String co) {
+        Detail detail = refused(EngineMessage.READING_CONTRADICTS, () -> Bench.run("burn", TestFuels.gas(fuel), "o2", "3 %",
+                "co", co)).detail();
+        assertEquals("co", detail.where());
+    }
+
     @Test
     void a_fuel_has_to_close_and_to_burn() {
         assertEquals("97 %", refused(EngineMessage.NOT_CLOSED,
                 () -> FuelBuilder.gas("lab", Map.of("CH4", 0.97), false)).detail().found());
-        refused(EngineMessage.NOT_CLOSED, () -> FuelBuilder.ultimate("coal", Phase.SOLID, new UltimateAnalysis(Map.of("C", 0.9), AnalysisBasis.DRY)));
+        refused(EngineMessage.NOT_CLOSED, () -> FuelBuilder.ultimate("coal", Phase.SOLID,
+                new UltimateAnalysis(Map.of("C", 0.9), AnalysisBasis.DRY)));
         refused(EngineMessage.IMPOSSIBLE, () -> FuelBuilder.gas("lab", Map.of("CH4", 1.1, "N2", -0.1), false));
         refused(EngineMessage.IMPOSSIBLE, () -> FuelBuilder.gas("lab", Map.of("CH4", Double.NaN), false));
         refused(EngineMessage.NOTHING_TO_BURN, () -> FuelBuilder.gas("lab", Map.of("N2", 0.5, "CO2", 0.5), false).build());
@@ -189,7 +203,10 @@ class RefusalTest {
 
     @Test
     void other_impossible_states_are_refused() {
-        refused(EngineMessage.MORE_CARBON_THAN_FUEL, () -> Bench.run("burn", TestFuels.BITUMINOUS_COAL, "o2", "3 %", "unburnedCarbon", "75 %"));
+        refused(EngineMessage.MORE_CARBON_THAN_FUEL, () -> Bench.run("burn", TestFuels.BITUMINOUS_COAL, "o2", "3 %",
+                "unburnedCarbon", "75 %"));
+        Fuel carbonOfItsOxide = TestFuels.gas("CO 20, CO2 80");
+        refused(EngineMessage.MORE_CARBON_THAN_FUEL, () -> Bench.run("burn", carbonOfItsOxide, "lambda", "1.2", "unburnedCarbon", "15 %"));
         refused(EngineMessage.IMPOSSIBLE, () -> Bench.run("burn", GAS, "o2", "3 %", "humidity", "100 %", "ambient", "120 degC"));
         refused(EngineMessage.IMPOSSIBLE, () -> Bench.run("dewPoint", TestFuels.solid("C 100", 0), "o2", "3 %"));
         refused(EngineMessage.IMPOSSIBLE, () -> Bench.run("properties", GAS, "combustion", "17 degC"));

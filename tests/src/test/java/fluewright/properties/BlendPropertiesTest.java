@@ -24,7 +24,8 @@ class BlendPropertiesTest {
     @Property
     @Domain(RandomGases.class)
     void blends_of_gases_are_associative(@ForAll Fuel a, @ForAll Fuel b, @ForAll Fuel c, @ForAll Blend.By by,
-            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.9) double first, @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double second) {
+            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.9) double first,
+            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double second) {
         Fuel atOnce = blend(by, a, first, b, (1 - first) * second, c, (1 - first) * (1 - second));
         Fuel later = blend(by, b, second, c, 1 - second);
         Fuel inSteps = blend(by, a, first, later, 1 - first);
@@ -39,7 +40,8 @@ class BlendPropertiesTest {
     @Property
     @Domain(RandomFuels.class)
     void blends_of_any_fuels_by_mass_and_energy_are_associative(@ForAll Fuel a, @ForAll Fuel b, @ForAll Fuel c, @ForAll boolean byMass,
-            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.9) double first, @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double second) {
+            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.9) double first,
+            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double second) {
         Blend.By by = byMass ? Blend.By.MASS : Blend.By.ENERGY;
         Fuel atOnce = blend(by, a, first, b, (1 - first) * second, c, (1 - first) * (1 - second));
         assertSame(atOnce, blend(by, a, first, blend(by, b, second, c, 1 - second), 1 - first));
@@ -48,7 +50,8 @@ class BlendPropertiesTest {
     /** Shares of mass are means of what a kilogram has; shares of volume are means of what a mole has. */
     @Property
     @Domain(RandomGases.class)
-    void blends_by_mass_and_volume_are_means(@ForAll Fuel a, @ForAll Fuel b, @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double share) {
+    void blends_by_mass_and_volume_are_means(@ForAll Fuel a, @ForAll Fuel b,
+            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double share) {
         Fuel byMass = blend(Blend.By.MASS, a, share, b, 1 - share);
         double gross = share * a.gross() + (1 - share) * b.gross();
         assertEquals(gross, byMass.gross(), RELATIVE * gross);
@@ -60,7 +63,8 @@ class BlendPropertiesTest {
     /** Of a blend by energy, each fuel's mass share times its heating value is its share of the heat. */
     @Property
     @Domain(RandomFuels.class)
-    void blends_by_energy_share_the_heat(@ForAll Fuel a, @ForAll Fuel b, @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double share) {
+    void blends_by_energy_share_the_heat(@ForAll Fuel a, @ForAll Fuel b,
+            @ForAll @Scale(6) @DoubleRange(min = 0.05, max = 0.95) double share) {
         Fuel blend = blend(Blend.By.ENERGY, a, share, b, 1 - share);
         assertEquals(1 / blend.gross(), share / a.gross() + (1 - share) / b.gross(), RELATIVE / blend.gross());
     }

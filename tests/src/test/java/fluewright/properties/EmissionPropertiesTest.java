@@ -50,7 +50,8 @@ class EmissionPropertiesTest {
         double corrected = Bench.in("ppm", here, "corrected");
         Outcome there = Bench.run("correct", fuel, "nox", Value.of(corrected, "ppm"), "at", Value.of(other, "pct"));
         assertEquals(Bench.si(here, "perMMBtu"), Bench.si(there, "perMMBtu"), 1e-9 * Bench.si(here, "perMMBtu"));
-        Outcome back = Bench.run("correct", fuel, "nox", Value.of(Bench.in("lb/MMBtu", here, "perMMBtu"), "lb/MMBtu"), "to", Value.of(other, "pct"));
+        Outcome back = Bench.run("correct", fuel, "nox", Value.of(Bench.in("lb/MMBtu", here, "perMMBtu"), "lb/MMBtu"), "to",
+                Value.of(other, "pct"));
         assertEquals(corrected, Bench.in("ppm", back, "corrected"), 1e-9 * corrected);
     }
 

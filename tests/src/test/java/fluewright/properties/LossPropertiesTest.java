@@ -24,8 +24,10 @@ class LossPropertiesTest {
 
     @Property
     void losses_and_efficiency_make_one(@ForAll Fuel fuel, @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.15) double o2,
-            @ForAll @Scale(6) @DoubleRange(min = 300, max = 1500) double stack, @ForAll @Scale(6) @DoubleRange(min = 250, max = 600) double air,
-            @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.1) double radiation, @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.05) double humidity) {
+            @ForAll @Scale(6) @DoubleRange(min = 300, max = 1500) double stack,
+            @ForAll @Scale(6) @DoubleRange(min = 250, max = 600) double air,
+            @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.1) double radiation,
+            @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.05) double humidity) {
         Outcome losses = Bench.run("losses", fuel, "o2", Value.of(o2, "1"), "stack", Value.of(stack, "K"), "air", Value.of(air, "K"),
                 "radiation", Value.of(radiation, "1"), "other", Value.of(0.01, "1"), "humidityRatio", Value.of(humidity, "kg/kg"));
         double flue = FLUE.stream().mapToDouble(part -> Bench.si(losses, part)).sum() - Bench.si(losses, "airCredit");
@@ -46,14 +48,16 @@ class LossPropertiesTest {
 
     @Property
     void flue_loss_rises_with_the_stack_temperature(@ForAll Fuel fuel, @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.15) double o2,
-            @ForAll @Scale(6) @DoubleRange(min = 250, max = 1500) double stack, @ForAll @Scale(6) @DoubleRange(min = 0.1, max = 300) double more) {
+            @ForAll @Scale(6) @DoubleRange(min = 250, max = 1500) double stack,
+            @ForAll @Scale(6) @DoubleRange(min = 0.1, max = 300) double more) {
         assertTrue(Bench.si(losses(fuel, o2, stack + more), "flueLoss") > Bench.si(losses(fuel, o2, stack), "flueLoss"));
     }
 
     /** More air leaves hotter than it came, so that it takes heat along. */
     @Property
     void flue_loss_rises_with_oxygen(@ForAll Fuel fuel, @ForAll @Scale(6) @DoubleRange(min = 0, max = 0.15) double o2,
-            @ForAll @Scale(6) @DoubleRange(min = 0.001, max = 0.04) double more, @ForAll @Scale(6) @DoubleRange(min = 300, max = 1500) double stack) {
+            @ForAll @Scale(6) @DoubleRange(min = 0.001, max = 0.04) double more,
+            @ForAll @Scale(6) @DoubleRange(min = 300, max = 1500) double stack) {
         assertTrue(Bench.si(losses(fuel, o2 + more, stack), "flueLoss") > Bench.si(losses(fuel, o2, stack), "flueLoss"));
     }
 

@@ -18,8 +18,8 @@ import net.jqwik.api.domains.DomainContextBase;
 /** Random fuels: gas blends that always have something to burn, and ultimate analyses on any basis. */
 public class RandomFuels extends DomainContextBase {
 
-    private static final List<String> GASES = List.of("CH4", "C2H6", "C3H8", "n-C4H10", "i-C4H10", "C2H4", "H2", "CO", "CO2", "N2", "O2",
-            "H2O", "H2S", "NH3", "Ar", "He", "Ne", "COS", "CH3OH", "C6H6", "C2H5OH");
+    private static final List<String> GASES = List.of("CH4", "C2H6", "C3H8", "n-C4H10", "i-C4H10", "C2H4", "H2", "CO", "CO2", "N2",
+            "O2", "H2O", "H2S", "NH3", "Ar", "He", "Ne", "COS", "CH3OH", "C6H6", "C2H5OH");
 
     /** Fuels of all phases. */
     @Provide

@@ -25,7 +25,8 @@ class DewPointTest {
     @MethodSource("dewPoints")
     void dew_point_of_dry_air_and_a_fuel(Check check) {
         boolean altitude = check.inputs().contains("84.0 kPa");
-        Outcome outcome = Bench.run("dewPoint", fuel(check.fuel()), "excessAir", (check.has("excess air") ? check.input("excess air") : 0) + " %",
+        Outcome outcome = Bench.run("dewPoint", fuel(check.fuel()), "excessAir",
+                (check.has("excess air") ? check.input("excess air") : 0) + " %",
                 "stackPressure", altitude ? "84.0 kPa" : "101.325 kPa");
         double celsius = Bench.in("degC", outcome, "dewPoint");
         if (check.tolerance().equals("range")) {

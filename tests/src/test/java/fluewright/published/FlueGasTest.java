@@ -26,7 +26,8 @@ class FlueGasTest {
     void theoretical_air_and_flue_gas_of_analyses(Check check) {
         switch (check.quantity()) {
             case "theoretical air by volume" -> check.verify(Bench.in("m3/m3", burn(fuel(check), 0), "theoreticalAirPerGas"));
-            case "theoretical air by mass", "theoretical dry air" -> check.verify(Bench.in("kg/kg", burn(fuel(check), 0), "theoreticalAir"));
+            case "theoretical air by mass", "theoretical dry air" -> check.verify(Bench.in("kg/kg", burn(fuel(check), 0),
+                    "theoreticalAir"));
             case "theoretical air per heat" -> check.verifyRange(Bench.in("lb/MMBtu", burn(fuel(check), 0), "airPerMMBtu") / 100);
             case "flue gas at 25 % excess air, dry air" -> verifyFlueGas(check, burn(fuel(check), 25));
             default -> fail(check.toString());

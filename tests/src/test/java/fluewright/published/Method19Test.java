@@ -127,7 +127,8 @@ class Method19Test {
         boolean wetPollutant = check.inputs().contains("ppmvw");
         arguments.addAll(List.of(pollutant.toLowerCase(Locale.ROOT), check.input(pollutant) + (wetPollutant ? " ppmvw" : " ppmvd")));
         String wet = check.inputs().contains("% wet") ? "Wet" : "";
-        arguments.addAll(check.has("O2") ? List.of("at" + wet, check.input("O2") + " %") : List.of("atCo2" + wet, check.input("CO2") + " %"));
+        arguments.addAll(check.has("O2") ? List.of("at" + wet, check.input("O2") + " %") : List.of("atCo2" + wet,
+                check.input("CO2") + " %"));
         if (check.has("Bws")) {
             arguments.addAll(List.of("moisture", 100 * check.input("Bws") + " %"));
         }
@@ -135,6 +136,17 @@ class Method19Test {
             arguments.addAll(List.of("ambientMoisture", 100 * check.input("Bwa") + " %"));
         }
         return arguments;
+    }
+
+    /**
+     * Equation 19-9 by hand (from memory; no row has it), a dry emission and a wet CO2: NOx 200 ppmvd, CO2 12 % wet, moisture 8 %,
+     * Fc 1800: 200 x 1.194e-7 x (1 - 0.08) x 1800 x 100 / 12 = 0.32954 lb/MMBtu.
+     */
+    @Test
+    void emission_rate_of_a_dry_emission_and_a_wet_carbon_dioxide() {
+        Outcome outcome = Bench.run("correct", TestFuels.ofClass("bituminous coal"), "nox", "200 ppmvd", "atCo2Wet", "12 %",
+                "moisture", "8 %");
+        assertEquals(0.32954, Bench.in("lb/MMBtu", outcome, "perMMBtu"), 0.0001);
     }
 
     static Stream<Check> analyses() {
@@ -188,7 +200,8 @@ class Method19Test {
     /** Every row of the file belongs to one of the tests above, but for one in DoubtfulValuesTest. */
     @Test
     void no_row_is_left_out() {
-        long tested = Stream.of(table(), coefficients(), constants(), equations(), analyses(), fo(), foRanges()).mapToLong(Stream::count).sum();
+        long tested = Stream.of(table(), coefficients(), constants(), equations(), analyses(), fo(),
+                foRanges()).mapToLong(Stream::count).sum();
         assertEquals(CheckFile.all("01-method19").count() - 1, tested);
     }
 }

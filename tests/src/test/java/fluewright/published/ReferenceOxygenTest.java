@@ -29,8 +29,10 @@ class ReferenceOxygenTest {
             case "difference between the two rules" -> check.verify(differenceOfRules(check));
             case "wet to dry concentration" -> check.verify(dryOfWet(check));
             case "mg/m3" -> check.verify(massPerPpm(check));
-            case "NOx" -> check.verify(Bench.in("mg/Nm3", Bench.run("correct", "nox", "60 ppmvd", "at", "3 %", "to", "3 %"), "correctedMass"));
-            case "CO air-free" -> check.verify(Bench.in("ppm", correct("co", check.input("CO") + " ppm", check.input("O2"), 0, "20.9 %"), "airFree"));
+            case "NOx" -> check.verify(Bench.in("mg/Nm3", Bench.run("correct", "nox", "60 ppmvd", "at", "3 %", "to", "3 %"),
+                    "correctedMass"));
+            case "CO air-free" -> check.verify(Bench.in("ppm", correct("co", check.input("CO") + " ppm", check.input("O2"), 0,
+                    "20.9 %"), "airFree"));
             case "NOx mg/kWh (net)" -> check.verify(milligramPerKilowattHour());
             default -> fail(check.toString());
         }
@@ -41,23 +43,28 @@ class ReferenceOxygenTest {
     }
 
     private static double correctedMass(Check check) {
-        return Bench.in("mg/Nm3", correct("nox", check.input("E_M") + " mg/Nm3", check.input("O2 measured"), check.input("O2 reference"), "21 %"),
+        return Bench.in("mg/Nm3", correct("nox", check.input("E_M") + " mg/Nm3", check.input("O2 measured"),
+                check.input("O2 reference"), "21 %"),
                 "correctedMass");
     }
 
     private static double correctedPpm(Check check) {
-        return Bench.in("ppm", correct("nox", check.input("C") + " ppmvd", check.input("O2 measured"), check.input("O2 reference"), "20.9 %"),
+        return Bench.in("ppm", correct("nox", check.input("C") + " ppmvd", check.input("O2 measured"), check.input("O2 reference"),
+                "20.9 %"),
                 "corrected");
     }
 
     private static double differenceOfRules(Check check) {
-        double us = Bench.si(correct("nox", check.input("C") + " ppm", check.input("O2 measured"), check.input("reference"), "20.9 %"), "corrected");
-        double eu = Bench.si(correct("nox", check.input("C") + " ppm", check.input("O2 measured"), check.input("reference"), "21 %"), "corrected");
+        double us = Bench.si(correct("nox", check.input("C") + " ppm", check.input("O2 measured"), check.input("reference"), "20.9 %"),
+                "corrected");
+        double eu = Bench.si(correct("nox", check.input("C") + " ppm", check.input("O2 measured"), check.input("reference"), "21 %"),
+                "corrected");
         return 100 * (us / eu - 1);
     }
 
     private static double dryOfWet(Check check) {
-        Outcome outcome = Bench.run("correct", "nox", check.input("C wet") + " ppmvw", "moisture", 100 * check.input("moisture") + " %", "at", "3 %");
+        Outcome outcome = Bench.run("correct", "nox", check.input("C wet") + " ppmvw", "moisture", 100 * check.input("moisture") + " %",
+                "at", "3 %");
         return Bench.in("ppm", outcome, "measured");
     }
 
@@ -99,7 +106,8 @@ class ReferenceOxygenTest {
     @ParameterizedTest
     @CsvSource({"methane, 2.499, 3", "propane, 4.3888, 5"})
     void moisture_comes_from_the_fuel(String fuel, double wet, double dry) {
-        Outcome outcome = Bench.run("correct", fuel.equals("methane") ? TestFuels.METHANE : TestFuels.PROPANE, "nox", "50 ppmvd", "atWet", wet + " %");
+        Outcome outcome = Bench.run("correct", fuel.equals("methane") ? TestFuels.METHANE : TestFuels.PROPANE, "nox", "50 ppmvd",
+                "atWet", wet + " %");
         assertEquals(dry, Bench.in("pct", outcome, "o2"), 0.002 * dry);
     }
 }

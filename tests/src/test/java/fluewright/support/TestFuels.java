@@ -58,7 +58,8 @@ public final class TestFuels {
      * @param gross measured gross heating value [J/kg]; zero to take the estimate
      */
     public static Fuel solid(String analysis, double gross) {
-        FuelBuilder builder = FuelBuilder.ultimate(analysis, Phase.SOLID, new UltimateAnalysis(shares(analysis), AnalysisBasis.AS_RECEIVED));
+        FuelBuilder builder = FuelBuilder.ultimate(analysis, Phase.SOLID, new UltimateAnalysis(shares(analysis),
+                AnalysisBasis.AS_RECEIVED));
         return (gross > 0 ? builder.measuredPerMass(gross) : builder).build();
     }
 
