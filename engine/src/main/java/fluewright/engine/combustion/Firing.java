@@ -83,9 +83,10 @@ public record Firing(
         Makeup makeup = fuel.makeup();
         double share = carbonInAsh.orElse(0);
         double carbon = unburnedCarbon.orElse(makeup.ash() * share / (1 - share));
-        if (carbon >= makeup.massFraction(Element.C) && carbon > 0) {
+        double burnable = Math.min(makeup.atoms(Element.C), makeup.oxygenDemand()) * Element.C.molarMass();
+        if (carbon >= burnable && carbon > 0) {
             throw new InputException(EngineMessage.MORE_CARBON_THAN_FUEL, Detail.at("unburned carbon").found(percent(carbon))
-                    .expected("less than the fuel's " + percent(makeup.massFraction(Element.C))));
+                    .expected("less than the fuel's " + percent(burnable)));
         }
         return carbon;
     }
@@ -146,6 +147,11 @@ public record Firing(
     }
 
     private void requireComplete(FlueGas gas, Stoichiometry s) {
+        double dry = gas.dry().total();
+        if (co * dry > s.carbon()) {
+            throw new InputException(EngineMessage.READING_CONTRADICTS, Detail.at("co").found("CO " + percent(co))
+                    .expected("CO up to " + percent(s.carbon() / dry) + " dry, all carbon of " + fuel.id()));
+        }
         boolean enoughOxygen = gas.wet().moles().values().stream().allMatch(n -> n >= 0);
         if (!enoughOxygen && co2.isPresent()) {
             throw new InputException(EngineMessage.CO2_ABOVE_MAXIMUM, Detail.at("co2").found(percent(co2.getAsDouble()))

@@ -132,10 +132,11 @@ final class EmissionConversion {
         if (input.fuel().isEmpty() || !(needsMoisture || needsOxygen)) {
             return null;
         }
-        if (needsMoisture) {
+        FlueGas gas = solve(new Stoichiometry(input.fuel().get().makeup(), 0));
+        if (needsMoisture && gas != null) {
             notes.remark(EngineMessage.MOISTURE_COMPUTED, Detail.at(input.fuel().get().id()));
         }
-        return solve(new Stoichiometry(input.fuel().get().makeup(), 0));
+        return gas;
     }
 
     private FlueGas solve(Stoichiometry s) {
