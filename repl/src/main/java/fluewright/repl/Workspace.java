@@ -9,6 +9,7 @@ import fluewright.repl.language.ResultSink;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
+import java.util.Map;
 
 /** A session together with the evaluator that serves it. */
 final class Workspace {
@@ -33,7 +34,8 @@ final class Workspace {
 
     private Collection<String> allNames(Names names) {
         List<String> all = new ArrayList<>(names.known());
-        evaluator.variables().getVariables().keySet().forEach(name -> all.add(name.toString()));
+        Map<?, ?> variables = evaluator.variables().getVariables();
+        variables.keySet().forEach(name -> all.add(name.toString()));
         return all;
     }
 

@@ -1,0 +1,33 @@
+package fluewright.repl.editor;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.OutputStream;
+import java.nio.charset.StandardCharsets;
+import org.jline.terminal.Size;
+import org.jline.terminal.Terminal;
+import org.jline.terminal.TerminalBuilder;
+import org.jline.terminal.impl.ExternalTerminal;
+
+/** Opens terminals without asking them questions, for every question costs a wait for the answer. */
+public final class Terminals {
+    private static final int COLUMNS = 100;
+    private static final int ROWS = 30;
+
+    private Terminals() {
+    }
+
+    /** The terminal that this process runs in. */
+    public static Terminal ofProcess(boolean dumb) throws IOException {
+        return TerminalBuilder.builder().name("fluewright").provider(TerminalBuilder.PROP_PROVIDER_JNI)
+            .encoding(StandardCharsets.UTF_8).graphemeCluster(false).dumb(true).system(true).type(dumb ? Terminal.TYPE_DUMB : null)
+            .nativeSignals(true).signalHandler(Terminal.SignalHandler.SIG_IGN).build();
+    }
+
+    /** A terminal behind two streams, of the kind that most people have; no device is needed for it. */
+    public static Terminal ofStreams(InputStream in, OutputStream out) throws IOException {
+        Terminal terminal = new ExternalTerminal("fluewright", "xterm-256color", in, out, StandardCharsets.UTF_8);
+        terminal.setSize(Size.of(COLUMNS, ROWS));
+        return terminal;
+    }
+}
