@@ -11,23 +11,30 @@ import org.jline.terminal.impl.ExternalTerminal;
 
 /** Opens terminals without asking them questions, for every question costs a wait for the answer. */
 public final class Terminals {
-    private static final int COLUMNS = 100;
-    private static final int ROWS = 30;
+    private static final int COLUMNS = 80;
+    private static final int ROWS = 24;
 
     private Terminals() {
     }
 
     /** The terminal that this process runs in. */
     public static Terminal ofProcess(boolean dumb) throws IOException {
-        return TerminalBuilder.builder().name("fluewright").provider(TerminalBuilder.PROP_PROVIDER_JNI)
+        Terminal terminal = TerminalBuilder.builder().name("fluewright").provider(TerminalBuilder.PROP_PROVIDER_JNI)
             .encoding(StandardCharsets.UTF_8).graphemeCluster(false).dumb(true).system(true).type(dumb ? Terminal.TYPE_DUMB : null)
             .nativeSignals(true).signalHandler(Terminal.SignalHandler.SIG_IGN).build();
+        return sized(terminal);
+    }
+
+    /** Some devices do not know their size; nothing can be shown in no columns. */
+    private static Terminal sized(Terminal terminal) {
+        if (terminal.getWidth() <= 0 || terminal.getHeight() <= 0) {
+            terminal.setSize(Size.of(COLUMNS, ROWS));
+        }
+        return terminal;
     }
 
     /** A terminal behind two streams, of the kind that most people have; no device is needed for it. */
     public static Terminal ofStreams(InputStream in, OutputStream out) throws IOException {
-        Terminal terminal = new ExternalTerminal("fluewright", "xterm-256color", in, out, StandardCharsets.UTF_8);
-        terminal.setSize(Size.of(COLUMNS, ROWS));
-        return terminal;
+        return sized(new ExternalTerminal("fluewright", "xterm-256color", in, out, StandardCharsets.UTF_8));
     }
 }

@@ -2,14 +2,12 @@ package fluewright.repl.language;
 
 import groovy.lang.GroovyClassLoader;
 import groovy.lang.GroovyCodeSource;
-import groovy.transform.ThreadInterrupt;
 import java.lang.reflect.Method;
 import java.lang.reflect.Modifier;
 import java.util.Arrays;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.codehaus.groovy.control.CompilerConfiguration;
-import org.codehaus.groovy.control.customizers.ASTTransformationCustomizer;
 
 /** Compiles inputs; classes that one input declares are known to the next. */
 final class ScriptCompiler {
@@ -23,8 +21,7 @@ final class ScriptCompiler {
         configuration.setDisabledGlobalASTTransformations(Set.of("groovy.grape.GrabAnnotationTransformation"));
         // Plain call sites start faster than invokedynamic ones, and most inputs run once.
         configuration.getOptimizationOptions().put(CompilerConfiguration.INVOKEDYNAMIC, false);
-        configuration.addCompilationCustomizers(imports, new StatementRewriter(names, acknowledge),
-            new ASTTransformationCustomizer(ThreadInterrupt.class));
+        configuration.addCompilationCustomizers(imports, new StatementRewriter(names, acknowledge));
         loader = new GroovyClassLoader(ScriptCompiler.class.getClassLoader(), configuration);
     }
 

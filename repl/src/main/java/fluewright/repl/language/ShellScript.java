@@ -36,6 +36,13 @@ public abstract class ShellScript extends Script {
         return names.call(name, arguments);
     }
 
+    /** Called in every loop, closure and method. */
+    public static void checkInterrupt() throws InterruptedException {
+        if (Thread.interrupted()) {
+            throw new InterruptedException("stopped");
+        }
+    }
+
     /** Reaches functions that a call names only at run time. */
     @Override
     public Object invokeMethod(String name, Object arguments) {

@@ -21,8 +21,8 @@ import org.codehaus.groovy.control.customizers.CompilationCustomizer;
 import org.codehaus.groovy.syntax.Types;
 
 /**
- * Makes every top-level statement of a script tell its value, and every call by the name of a
- * shell function reach that function.
+ * Makes every top-level statement of a script tell its value, every call by the name of a shell
+ * function reach that function, and all of it interruptible.
  */
 final class StatementRewriter extends CompilationCustomizer {
     private final Names names;
@@ -43,6 +43,7 @@ final class StatementRewriter extends CompilationCustomizer {
         if (run != null && run.getCode() instanceof BlockStatement body) {
             rewrite(body.getStatements());
         }
+        new InterruptChecks(source).visitClass(type);
     }
 
     private void rewrite(List<Statement> statements) {
