@@ -27,7 +27,7 @@ public final class Terminals {
 
     /** Some devices do not know their size; nothing can be shown in no columns. */
     private static Terminal sized(Terminal terminal) {
-        if (terminal.getWidth() <= 0 || terminal.getHeight() <= 0) {
+        if (terminal.getColumns() <= 0 || terminal.getRows() <= 0) {
             terminal.setSize(Size.of(COLUMNS, ROWS));
         }
         return terminal;
