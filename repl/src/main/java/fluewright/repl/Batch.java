@@ -1,6 +1,7 @@
 package fluewright.repl;
 
 import fluewright.repl.language.Outcome;
+import fluewright.repl.language.Preload;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.AccessDeniedException;
@@ -19,6 +20,7 @@ final class Batch {
     }
 
     int run() {
+        Preload.start();
         try {
             return switch (options.task()) {
                 case EXPRESSION -> evaluate("expression", options.expression());

@@ -28,7 +28,7 @@ public final class Main {
     }
 
     private static int run(Options options) {
-        boolean terminal = System.console() != null;
+        boolean terminal = isTerminal();
         boolean interactive = terminal && options.task() == Options.Task.SHELL;
         Output output = Output.ofProcess(terminal, interactive);
         return switch (options.task()) {
@@ -39,6 +39,12 @@ public final class Main {
         };
     }
 
+    /** The launcher knows; asking Java takes a while. */
+    private static boolean isTerminal() {
+        String told = System.getProperty("fluewright.terminal");
+        return told == null ? System.console() != null : Boolean.parseBoolean(told);
+    }
+
     private static int print(Output output, String text) {
         output.out().print(text);
         return 0;
@@ -46,6 +52,11 @@ public final class Main {
 
     /** The version that Maven gave this build. */
     static String version() {
+        String told = System.getProperty("fluewright.version");
+        return told == null || told.isEmpty() ? storedVersion() : told;
+    }
+
+    private static String storedVersion() {
         try (InputStream in = Main.class.getResourceAsStream("version.txt")) {
             return in == null ? "unknown" : new String(in.readAllBytes(), StandardCharsets.UTF_8).strip();
         } catch (IOException unreadable) {

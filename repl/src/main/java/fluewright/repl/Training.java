@@ -11,6 +11,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import org.jline.terminal.Attributes;
 import org.jline.terminal.Terminal;
 
 /**
@@ -56,13 +57,13 @@ public final class Training {
         }
     }
 
-    /** The classes of a real terminal, which a build usually runs without. */
-    private static void nativeTerminal() throws IOException, ClassNotFoundException {
-        Terminals.ofProcess(false).close();
-        for (String name : List.of("terminal.impl.PosixSysTerminal", "terminal.impl.NativeSignalHandler",
-                "terminal.impl.jni.linux.LinuxNativePty", "nativ.CLibrary$WinSize", "nativ.CLibrary$Termios",
-                "terminal.impl.LinuxTermiosMapping")) {
-            Class.forName("org.jline." + name);
+    /** The classes of a real terminal, if the build runs the training in one. */
+    private static void nativeTerminal() throws IOException {
+        try (Terminal terminal = Terminals.ofProcess(false)) {
+            terminal.handle(Terminal.Signal.INT, Terminal.SignalHandler.SIG_IGN);
+            Attributes before = terminal.enterRawMode();
+            terminal.reader().peek(1);
+            terminal.setAttributes(before);
         }
     }
 

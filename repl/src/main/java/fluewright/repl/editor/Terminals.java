@@ -8,6 +8,7 @@ import org.jline.terminal.Size;
 import org.jline.terminal.Terminal;
 import org.jline.terminal.TerminalBuilder;
 import org.jline.terminal.impl.ExternalTerminal;
+import org.jline.utils.InfoCmp;
 
 /** Opens terminals without asking them questions, for every question costs a wait for the answer. */
 public final class Terminals {
@@ -19,10 +20,19 @@ public final class Terminals {
 
     /** The terminal that this process runs in. */
     public static Terminal ofProcess(boolean dumb) throws IOException {
+        useBuiltInDescription(System.getenv("TERM"));
         Terminal terminal = TerminalBuilder.builder().name("fluewright").provider(TerminalBuilder.PROP_PROVIDER_JNI)
             .encoding(StandardCharsets.UTF_8).graphemeCluster(false).dumb(true).system(true).type(dumb ? Terminal.TYPE_DUMB : null)
             .nativeSignals(true).signalHandler(Terminal.SignalHandler.SIG_IGN).build();
         return sized(terminal);
+    }
+
+    /** Without this the description of even a common terminal comes from another program. */
+    private static void useBuiltInDescription(String type) {
+        String description = type == null ? null : InfoCmp.getDefaultInfoCmp(type);
+        if (description != null) {
+            InfoCmp.setLoadedInfoCmp(type, description);
+        }
     }
 
     /** Some devices do not know their size; nothing can be shown in no columns. */
