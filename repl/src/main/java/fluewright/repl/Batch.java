@@ -1,7 +1,6 @@
 package fluewright.repl;
 
 import fluewright.repl.language.Outcome;
-import fluewright.repl.language.Preload;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.AccessDeniedException;
@@ -20,7 +19,6 @@ final class Batch {
     }
 
     int run() {
-        Preload.start();
         try {
             return switch (options.task()) {
                 case EXPRESSION -> evaluate("expression", options.expression());
@@ -35,7 +33,6 @@ final class Batch {
 
     private int evaluate(String title, String text) {
         Workspace workspace = Workspace.open(options, output);
-        workspace.evaluator().variables().setVariable("args", options.arguments().toArray(String[]::new));
         Outcome outcome = workspace.evaluator().evaluate(title, text);
         return outcome == Outcome.DONE ? 0 : Main.FAILED;
     }

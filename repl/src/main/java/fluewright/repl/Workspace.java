@@ -15,13 +15,13 @@ import java.util.Map;
 final class Workspace {
     private final Session session;
     private final Evaluator evaluator;
-    private final Vocabulary vocabulary;
+    private Vocabulary vocabulary;
 
     private Workspace(Options options, Output output) {
         session = Session.open(options, output);
         Names names = session.names();
         evaluator = new Evaluator(names, session.sink(), errors(names, output), output.interactive());
-        vocabulary = session.vocabulary(evaluator.variables().getVariables());
+        evaluator.whenReady(variables -> variables.setVariable("args", options.arguments().toArray(String[]::new)));
     }
 
     static Workspace open(Options options, Output output) {
@@ -58,7 +58,11 @@ final class Workspace {
         return evaluator;
     }
 
-    Vocabulary vocabulary() {
+    /** Made at the first call, for only the prompt needs it. */
+    synchronized Vocabulary vocabulary() {
+        if (vocabulary == null) {
+            vocabulary = session.vocabulary(evaluator.variables().getVariables());
+        }
         return vocabulary;
     }
 }

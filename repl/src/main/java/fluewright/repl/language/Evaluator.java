@@ -1,7 +1,13 @@
 package fluewright.repl.language;
 
 import groovy.lang.Script;
+import java.util.Queue;
+import java.util.concurrent.CancellationException;
+import java.util.concurrent.ConcurrentLinkedQueue;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
 import java.util.concurrent.atomic.AtomicInteger;
+import java.util.function.Consumer;
 import org.codehaus.groovy.runtime.InvokerHelper;
 
 /**
@@ -12,9 +18,10 @@ public final class Evaluator {
     private final Names names;
     private final ResultSink sink;
     private final ErrorPrinter errors;
-    private final ShellBinding binding;
+    private final FutureTask<ShellBinding> binding;
     private final ScriptCompiler compiler;
     private final Interruptible thread = new Interruptible();
+    private final Queue<Consumer<ShellBinding>> preparations = new ConcurrentLinkedQueue<>();
     private final AtomicInteger count = new AtomicInteger();
     private volatile Outcome outcome = Outcome.DONE;
 
@@ -23,12 +30,25 @@ public final class Evaluator {
         this.names = names;
         this.sink = sink;
         this.errors = errors;
-        binding = new ShellBinding(names, sink);
+        binding = new FutureTask<>(() -> new ShellBinding(names, sink));
+        Preload.start(binding);
         compiler = new ScriptCompiler(names, acknowledge);
     }
 
     public ShellBinding variables() {
-        return binding;
+        try {
+            return binding.get();
+        } catch (InterruptedException stopped) {
+            Thread.currentThread().interrupt();
+            throw new CancellationException("stopped");
+        } catch (ExecutionException failure) {
+            throw new IllegalStateException(failure.getCause());
+        }
+    }
+
+    /** Prepares the variables, before the first evaluation uses them. */
+    public void whenReady(Consumer<ShellBinding> preparation) {
+        preparations.add(preparation);
     }
 
     /** Evaluates the text; its results go to the sink, its failure to the error printer. */
@@ -63,13 +83,22 @@ public final class Evaluator {
         }
     }
 
-    private void run(SourceText source) {
-        Script script = InvokerHelper.createScript(compiler.compile(source), binding);
+    private void run(SourceText source) throws ClassNotFoundException {
+        Class<?> compiled = compiler.compile(source);
+        ShellBinding variables = prepared(variables());
+        Script script = InvokerHelper.createScript(compiled, variables);
         if (script instanceof ShellScript shellScript) {
             shellScript.connect(names, sink);
-            compiler.declaredMethods(script.getClass())
-                .forEach(name -> binding.setVariable(name, InvokerHelper.getMethodPointer(script, name)));
+            compiler.declaredMethods(compiled)
+                .forEach(name -> variables.setVariable(name, InvokerHelper.getMethodPointer(script, name)));
         }
         script.run();
+    }
+
+    private ShellBinding prepared(ShellBinding variables) {
+        for (Consumer<ShellBinding> next = preparations.poll(); next != null; next = preparations.poll()) {
+            next.accept(variables);
+        }
+        return variables;
     }
 }

@@ -1,26 +1,25 @@
 package fluewright.repl.language;
 
-/** Loads the parser and the class writer beside the start of everything else, on the second core. */
-public final class Preload {
-    private static final String[] CLASSES = {"org.apache.groovy.parser.antlr4.GroovyLexer",
-        "org.apache.groovy.parser.antlr4.GroovyParser", "groovyjarjarasm.asm.ClassWriter",
-        "groovyjarjarasm.asm.SymbolTable", "groovyjarjarasm.asm.MethodWriter", "groovyjarjarasm.asm.Frame",
-        "groovyjarjarasm.asm.Label", "groovyjarjarasm.asm.Type", "groovyjarjarasm.asm.CurrentFrame"};
+/** Does on the second core what an evaluation needs only after its text has been parsed. */
+final class Preload {
+    private static final String[] CLASS_WRITER = {"ClassWriter", "SymbolTable", "MethodWriter", "Frame", "Label",
+        "Type", "CurrentFrame", "FieldWriter", "AnnotationWriter"};
 
     private Preload() {
     }
 
-    /** Starts loading and returns at once. */
-    public static void start() {
-        Thread thread = new Thread(Preload::load, "preload");
+    /** Starts the work, then loads the classes that write classes, and returns at once. */
+    static void start(Runnable work) {
+        Thread thread = new Thread(() -> run(work), "preload");
         thread.setDaemon(true);
         thread.start();
     }
 
-    private static void load() {
+    private static void run(Runnable work) {
+        work.run();
         try {
-            for (String name : CLASSES) {
-                Class.forName(name);
+            for (String name : CLASS_WRITER) {
+                Class.forName("groovyjarjarasm.asm." + name);
             }
         } catch (ClassNotFoundException otherGroovy) {
             // Then the first evaluation loads what it needs.

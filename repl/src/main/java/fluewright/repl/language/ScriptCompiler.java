@@ -1,7 +1,5 @@
 package fluewright.repl.language;
 
-import groovy.lang.GroovyClassLoader;
-import groovy.lang.GroovyCodeSource;
 import java.lang.reflect.Method;
 import java.lang.reflect.Modifier;
 import java.util.Arrays;
@@ -11,7 +9,7 @@ import org.codehaus.groovy.control.CompilerConfiguration;
 
 /** Compiles inputs; classes that one input declares are known to the next. */
 final class ScriptCompiler {
-    private final GroovyClassLoader loader;
+    private final InputLoader loader;
     private final ImportMemory imports = new ImportMemory();
 
     ScriptCompiler(Names names, boolean acknowledge) {
@@ -22,12 +20,11 @@ final class ScriptCompiler {
         // Plain call sites start faster than invokedynamic ones, and most inputs run once.
         configuration.getOptimizationOptions().put(CompilerConfiguration.INVOKEDYNAMIC, false);
         configuration.addCompilationCustomizers(imports, new StatementRewriter(names, acknowledge));
-        loader = new GroovyClassLoader(ScriptCompiler.class.getClassLoader(), configuration);
+        loader = new InputLoader(ScriptCompiler.class.getClassLoader(), configuration);
     }
 
-    Class<?> compile(SourceText source) {
-        Class<?> compiled = loader.parseClass(
-            new GroovyCodeSource(source.text(), source.unit(), "/groovy/shell"), false);
+    Class<?> compile(SourceText source) throws ClassNotFoundException {
+        Class<?> compiled = loader.compile(source);
         imports.keep();
         return compiled;
     }
