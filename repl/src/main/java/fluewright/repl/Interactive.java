@@ -38,11 +38,17 @@ final class Interactive {
         Editor editor = new Editor(terminal, this::vocabulary, historyFile(), output.colour(), this::warn);
         terminal.writer().print("Fluewright " + Main.version() + ", combustion stoichiometry\n"
             + "Tab completes, Ctrl-C stops, Ctrl-D leaves\n");
-        startBehind(editor);
+        startBehind(editor, output.within(() -> columns(terminal)));
         for (String input = editor.read(); input != null && !leaves(input); input = editor.read()) {
             evaluate(input);
         }
         return 0;
+    }
+
+    /** A terminal that does not tell its width is taken to be as wide as most. */
+    private static int columns(Terminal terminal) {
+        int columns = terminal.getSize().getColumns();
+        return columns > 0 ? columns : 80;
     }
 
     private static Path historyFile() {
@@ -53,20 +59,20 @@ final class Interactive {
         output.err().println("warning: " + text);
     }
 
-    private void startBehind(Editor editor) {
-        Thread start = new Thread(() -> open(editor), "warm-up");
+    private void startBehind(Editor editor, Output results) {
+        Thread start = new Thread(() -> open(editor, results), "warm-up");
         start.setDaemon(true);
         start.start();
     }
 
     /** Waits for the prompt first: until it stands, everything else would only delay it. */
-    private void open(Editor editor) {
+    private void open(Editor editor, Output results) {
         try {
             while (!editor.isReading()) {
                 Thread.sleep(5);
             }
             Thread.sleep(15);
-            Workspace opened = Workspace.open(options, output);
+            Workspace opened = Workspace.open(options, results);
             workspace.complete(opened);
             opened.warmUp();
         } catch (InterruptedException | RuntimeException | Error failure) {

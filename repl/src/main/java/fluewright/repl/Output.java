@@ -8,14 +8,26 @@ import java.io.IOException;
 import java.io.OutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.util.function.IntSupplier;
 
 /**
  * Where results and messages go.
  *
  * @param interactive whether a person types at a prompt
  * @param colour      whether escape codes for colour are welcome on {@code out}
+ * @param width       the columns that a line may have
  */
-public record Output(PrintStream out, PrintStream err, boolean interactive, boolean colour) {
+public record Output(PrintStream out, PrintStream err, boolean interactive, boolean colour, IntSupplier width) {
+    /** An output whose lines may be as long as they like. */
+    Output(PrintStream out, PrintStream err, boolean interactive, boolean colour) {
+        this(out, err, interactive, colour, () -> Integer.MAX_VALUE);
+    }
+
+    /** This output with lines no longer than a width. */
+    Output within(IntSupplier columns) {
+        return new Output(out, err, interactive, colour, columns);
+    }
+
     /** The process's own streams; {@code System.out} is replaced, so that scripts get the same treatment. */
     static Output ofProcess(boolean terminal, boolean interactive) {
         PrintStream out = new PrintStream(

@@ -30,9 +30,6 @@ final class PluginFolder {
     }
 
     private static List<URL> jars(Path folder) {
-        if (!Files.isDirectory(folder)) {
-            throw new InputException(ShellMessage.NO_PLUGIN_FOLDER, Detail.at("--plugins").found(folder).expected("a folder with plugin jars"));
-        }
         List<Path> found = new ArrayList<>();
         try (DirectoryStream<Path> jars = Files.newDirectoryStream(folder, "*.jar")) {
             jars.forEach(found::add);

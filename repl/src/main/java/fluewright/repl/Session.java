@@ -20,6 +20,6 @@ public interface Session {
 
     /** The session that the options ask for. */
     static Session open(Options options, Output output) {
-        return new PlainSession(output);
+        return new WorkbenchSession(options, output);
     }
 }

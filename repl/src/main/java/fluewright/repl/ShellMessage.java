@@ -4,8 +4,8 @@ import fluewright.engine.message.Message;
 
 /** What the shell has to say on its own account. */
 public enum ShellMessage implements Message {
-    /** The folder of {@code --plugins} is not there or cannot be read. */
-    NO_PLUGIN_FOLDER("the plugins cannot be read"),
+    /** The folder of {@code --plugins} cannot be read. */
+    NO_PLUGIN_FOLDER("the folder of the plugins cannot be read"),
     /** A plugin jar whose service entry or class is faulty. */
     BAD_PLUGIN("a plugin cannot be loaded");
 

@@ -19,7 +19,8 @@ import org.jline.terminal.Terminal;
  * the archive it writes holds those of the prompt, of completion and of an evaluation.
  */
 public final class Training {
-    private static final List<String> KEYS = List.of("x = [1, 2.5].collect { it * 2 }.sum()\r", "x.\t\u0003", "pr\t\u0003",
+    private static final List<String> KEYS = List.of("x = [1, 2.5].collect { it * 2 }.sum()\r", "x.\t\u0003", "pr\t\u0003", "bu\t\u0003", "losses 'natural-gas', \t\u0003", "3.d\t\u0003", "fuel 'na\t\u0003",
+        "ng = fuel 'natural-gas'\r", "burn ng, excessAir: 15.pct, humidity: 60.pct\r", "_.dry.CO2 - 9.pct\r", "help losses\r",
         "f = { a -> a + 1 }\r", "f(x) / 3\r", "nowhere\r", "1 +* 2\r", "'text'\r", "\u0010\r", "(1 +\r", "2)\r");
     private static final String END = "\u0003\u0004";
     private static final int PAUSE_MILLIS = 120;
@@ -43,8 +44,11 @@ public final class Training {
 
     private static void batch(PrintStream quiet) throws Options.Unusable {
         Output output = new Output(quiet, quiet, false, false);
-        for (String text : List.of("1 + 1", "[1, 2].sum()", "nowhere", "def twice(a) { a * 2 }; twice 3.5")) {
+        for (String text : List.of("1 + 1", "[1, 2].sum()", "nowhere", "def twice(a) { a * 2 }; twice 3.5",
+                "losses fuel('natural-gas'), o2: 3.pct, stack: 180.degC, air: 20.degC", "losses fuel('no-2-oil'), o2: 3, stack: 350.degF",
+                "correct nox: 45.ppm, at: 5.2.pct, to: 3.pct, fuel: 'propane'", "gas CH4: 91.2.pct, C2H6: 5.pct, N2: 3.8.pct, hhv: 38.MJ/Sm3")) {
             new Batch(Options.parse("-e", text), output).run();
+            new Batch(Options.parse("--json", "-e", text), output).run();
         }
     }
 

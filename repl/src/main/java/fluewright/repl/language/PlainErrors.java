@@ -1,5 +1,6 @@
 package fluewright.repl.language;
 
+import fluewright.engine.message.InputException;
 import groovy.lang.MissingMethodException;
 import groovy.lang.MissingPropertyException;
 import java.util.ArrayList;
@@ -44,8 +45,8 @@ public final class PlainErrors implements ErrorPrinter {
 
     private List<String> cause(Throwable failure) {
         for (Throwable at = failure; at != null; at = at.getCause()) {
-            if (at instanceof Explained explained) {
-                return explained.lines();
+            if (at instanceof InputException refused) {
+                return refused.lines();
             }
         }
         return described(root(failure));
