@@ -13,7 +13,10 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** A declared component of an input or result record, as the catalog's users see it. */
+/**
+ * A declared component of an input or result record, as the catalog's users see it. Its intervals are read when first
+ * asked for: a start of the shell needs few of them.
+ */
 public final class Term {
 
     private final String name;
@@ -21,8 +24,8 @@ public final class Term {
     private final boolean optional;
     private final Component declared;
     private final List<Method> path;
-    private final Interval possible;
-    private final Interval valid;
+    private Interval possible;
+    private Interval valid;
     private final double defaultNumber;
 
     Term(String name, Class<?> type, boolean optional, Component declared, List<Method> path) {
@@ -31,8 +34,6 @@ public final class Term {
         this.optional = optional;
         this.declared = declared;
         this.path = path;
-        this.possible = Interval.parse(declared.possible());
-        this.valid = Interval.parse(declared.valid());
         this.defaultNumber = isNumber() && !byDefault().isEmpty() ? ValueText.parse(byDefault()).si() : Double.NaN;
     }
 
@@ -98,11 +99,17 @@ public final class Term {
 
     /** Returns the interval outside which an input is impossible. */
     public Interval possible() {
+        if (possible == null) {
+            possible = Interval.parse(declared.possible());
+        }
         return possible;
     }
 
     /** Returns the method's valid interval. */
     public Interval valid() {
+        if (valid == null) {
+            valid = Interval.parse(declared.valid());
+        }
         return valid;
     }
 

@@ -84,7 +84,7 @@ public final class Value<Q extends Quantity<Q>> implements Quantity<Q>, Comparab
     }
 
     private Value<?> to(NamedUnit target) {
-        requireSameDimension("to", target);
+        requireSameDimension("to", target, target.symbol());
         boolean scaleChanges = unit.isTemperatureScale() != target.isTemperatureScale();
         if (scaleChanges || !basis.agreesWith(target.basis())) {
             throw mismatch("to", target.symbol());
@@ -154,15 +154,15 @@ public final class Value<Q extends Quantity<Q>> implements Quantity<Q>, Comparab
     }
 
     private void requireComparable(String operation, Value<?> other) {
-        requireSameDimension(operation, other.unit);
+        requireSameDimension(operation, other.unit, other.toString());
         if (!basis.agreesWith(other.basis)) {
             throw mismatch(operation, other.toString());
         }
     }
 
-    private void requireSameDimension(String operation, NamedUnit other) {
+    private void requireSameDimension(String operation, NamedUnit other, String shown) {
         if (!unit.hasDimensionOf(other)) {
-            throw mismatch(operation, other.symbol());
+            throw mismatch(operation, shown);
         }
     }
 

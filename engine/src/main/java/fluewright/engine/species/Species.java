@@ -30,6 +30,7 @@ public final class Species {
     private final double formation;
     private final double[] low;
     private final double[] high;
+    private final double reference;
 
     Species(String name, String title, Map<Element, Double> atoms, double molarMass, double formation, double[] low, double[] high) {
         this.name = name;
@@ -39,6 +40,7 @@ public final class Species {
         this.formation = formation;
         this.low = low;
         this.high = high;
+        this.reference = enthalpy(T_REF);
     }
 
     /** Returns the name, such as {@code CO2} or {@code n-C4H10}. */
@@ -86,7 +88,7 @@ public final class Species {
 
     /** Returns the enthalpy above that at 298.15 K [J/mol], at a temperature [K] from 200 to 6000. */
     public double sensibleHeat(double t) {
-        return enthalpy(t) - formation;
+        return enthalpy(t) - reference;
     }
 
     @Override
