@@ -83,8 +83,11 @@ public final class Evaluator {
         }
     }
 
-    private void run(SourceText source) throws ClassNotFoundException {
+    private void run(SourceText source) {
         Class<?> compiled = compiler.compile(source);
+        if (compiled == null) {
+            return;
+        }
         ShellBinding variables = prepared(variables());
         Script script = InvokerHelper.createScript(compiled, variables);
         if (script instanceof ShellScript shellScript) {

@@ -15,16 +15,20 @@ final class InputLoader extends GroovyClassLoader {
         this.configuration = configuration;
     }
 
-    /** The class of the script itself; others that the text declares are kept as well. */
-    Class<?> compile(SourceText source) throws ClassNotFoundException {
+    /** The script's own class, or null when the text only declares classes; all of them are kept. */
+    Class<?> compile(SourceText source) {
         CompilationUnit unit = createCompilationUnit(configuration, null);
         SourceUnit text = unit.addSource(source.unit(), source.text());
         ClassCollector collector = createCollector(unit, text);
         unit.setClassgenCallback(collector);
         unit.compile(Phases.CLASS_GENERATION);
+        String wanted = source.unit().substring(0, source.unit().indexOf('.'));
+        Class<?> script = null;
         for (Object loaded : collector.getLoadedClasses()) {
-            setClassCacheEntry((Class<?>) loaded);
+            Class<?> type = (Class<?>) loaded;
+            setClassCacheEntry(type);
+            script = type.getName().equals(wanted) ? type : script;
         }
-        return loadClass(source.unit().substring(0, source.unit().indexOf('.')));
+        return script;
     }
 }

@@ -23,7 +23,8 @@ final class ScriptCompiler {
         loader = new InputLoader(ScriptCompiler.class.getClassLoader(), configuration);
     }
 
-    Class<?> compile(SourceText source) throws ClassNotFoundException {
+    /** The script's class, or null when the text only declares classes. */
+    Class<?> compile(SourceText source) {
         Class<?> compiled = loader.compile(source);
         imports.keep();
         return compiled;
