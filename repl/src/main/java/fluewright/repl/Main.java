@@ -3,6 +3,7 @@ package fluewright.repl;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
 
 /** The command {@code fluewright}. */
 public final class Main {
@@ -28,6 +29,10 @@ public final class Main {
     }
 
     private static int run(Options options) {
+        if (options.plugins() != null && !Files.isDirectory(options.plugins())) {
+            System.err.println("fluewright: option --plugins needs a folder; there is none at " + options.plugins());
+            return UNUSABLE;
+        }
         boolean terminal = isTerminal();
         boolean interactive = terminal && options.task() == Options.Task.SHELL;
         Output output = Output.ofProcess(terminal, interactive);

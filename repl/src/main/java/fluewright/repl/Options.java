@@ -1,7 +1,6 @@
 package fluewright.repl;
 
 import fluewright.repl.language.Nearest;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 
@@ -77,7 +76,7 @@ public record Options(Task task, String expression, String script, List<String> 
             switch (option) {
                 case "-e" -> expression = value(option, "an expression");
                 case "--json" -> json = true;
-                case "--plugins" -> plugins = folder(value(option, "a folder"));
+                case "--plugins" -> plugins = Path.of(value(option, "a folder"));
                 case "--version" -> wanted = Task.VERSION;
                 case "--help", "-h" -> wanted = Task.HELP;
                 default -> throw unknown(option);
@@ -89,13 +88,6 @@ public record Options(Task task, String expression, String script, List<String> 
                 throw new Unusable("option " + option + " needs " + what);
             }
             return words.get(at++);
-        }
-
-        private static Path folder(String name) throws Unusable {
-            if (!Files.isDirectory(Path.of(name))) {
-                throw new Unusable("option --plugins needs a folder; there is none at " + name);
-            }
-            return Path.of(name);
         }
 
         private static Unusable unknown(String option) {

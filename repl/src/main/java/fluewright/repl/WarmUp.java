@@ -7,16 +7,21 @@ import fluewright.repl.output.Printer;
 import java.util.List;
 import java.util.Map;
 
-/** Does once what the first results will need, while the user still reads the prompt. */
+/** Does once what the first results will need: behind the prompt, or on the other core while a text is compiled. */
 final class WarmUp {
 
     private WarmUp() {
     }
 
-    static void run(Workbench workbench) {
+    /** Runs one calculation to its printed lines, so that tables are read and classes are ready. */
+    static void firstResult(Workbench workbench) {
         Map<Object, Object> reading = Map.of("o2", Value.of(3, "pct"), "stack", Value.of(180, "degC"));
         Object losses = workbench.function("losses").orElseThrow().call(List.of("methane"), reading);
         new Printer(workbench::shown).lines(losses, 80);
+    }
+
+    /** Prepares besides what completion looks up. */
+    static void completion(Workbench workbench) {
         workbench.functions().forEach(ShellFunction::arguments);
         workbench.fuelIds().forEach(workbench::fuelEntry);
     }

@@ -23,6 +23,18 @@ final class WorkbenchSession implements Session {
     WorkbenchSession(Options options, Output output) {
         this.options = options;
         this.output = output;
+        Thread prepare = new Thread(this::prepare, "workbench");
+        prepare.setDaemon(true);
+        prepare.start();
+    }
+
+    /** Runs beside the compiler of the first text. */
+    private void prepare() {
+        try {
+            WarmUp.firstResult(workbench());
+        } catch (RuntimeException | LinkageError toldWhenUsed) {
+            // The text that needs it meets the same failure and tells it.
+        }
     }
 
     private synchronized Workbench workbench() {
@@ -66,6 +78,6 @@ final class WorkbenchSession implements Session {
 
     @Override
     public void warmUp() {
-        WarmUp.run(workbench());
+        WarmUp.completion(workbench());
     }
 }

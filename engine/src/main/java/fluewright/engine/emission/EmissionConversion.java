@@ -165,8 +165,9 @@ final class EmissionConversion {
 
     private void requireMoisture(double number, boolean otherWay, String what) {
         if (Double.isNaN(number) && !otherWay) {
+            String fuel = input.fuel().isEmpty() && input.atCo2Wet().isEmpty() ? ", or a fuel to compute it from" : "";
             throw new InputException(EngineMessage.NEEDS_ALSO, Detail.at("correct " + what).found("a wet reading")
-                    .expected("moisture: 16.pct, or a fuel to compute it from"));
+                    .expected("moisture: 16.pct" + fuel));
         }
     }
 

@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.function.Consumer;
 import java.util.function.Supplier;
 import org.codehaus.groovy.control.CompilationFailedException;
+import org.codehaus.groovy.control.MultipleCompilationErrorsException;
 
 /** Tells a failure in at most five lines, with the line of the user's text and near names. */
 public final class PlainErrors implements ErrorPrinter {
@@ -31,10 +32,11 @@ public final class PlainErrors implements ErrorPrinter {
     }
 
     List<String> lines(Throwable failure, SourceText source) {
-        if (failure instanceof CompilationFailedException syntax) {
+        InputException refused = refusal(failure);
+        if (refused == null && failure instanceof CompilationFailedException syntax) {
             return SyntaxLines.of(syntax, source);
         }
-        List<String> lines = new ArrayList<>(cause(failure));
+        List<String> lines = new ArrayList<>(refused == null ? described(root(failure)) : refused.lines());
         int line = lineOf(failure, source);
         if (line > 0 && !source.isOneLine()) {
             String where = source.title() + " line " + line + ": " + source.line(line).strip();
@@ -43,13 +45,18 @@ public final class PlainErrors implements ErrorPrinter {
         return lines;
     }
 
-    private List<String> cause(Throwable failure) {
+    /** What the engine or the shell refused, however wrapped; null if it is something else. */
+    private static InputException refusal(Throwable failure) {
         for (Throwable at = failure; at != null; at = at.getCause()) {
             if (at instanceof InputException refused) {
-                return refused.lines();
+                return refused;
+            }
+            if (at instanceof MultipleCompilationErrorsException compiling
+                && compiling.getErrorCollector().getErrorCount() > 0 && compiling.getErrorCollector().getException(0) != null) {
+                return refusal(compiling.getErrorCollector().getException(0));
             }
         }
-        return described(root(failure));
+        return null;
     }
 
     /** The failure itself, out of the wrappings that reflection puts around it. */
