@@ -90,6 +90,16 @@ class ReferenceOxygenTest {
     }
 
     /**
+     * By hand: the oxygen of the air that a rule sets holds for the mass per heat too: 30 ppm NOx at 3 %, Fd 8710 scf/MMBtu, 21 %:
+     * 30 x 1.19393e-7 x 8710 x 21/(21 - 3) = 0.036397 lb/MMBtu (46.0055 / 385.33e6 = 1.19393e-7 lb/scf; by 20.9 % it is 0.036426).
+     */
+    @Test
+    void mass_per_heat_by_the_21_rule() {
+        Outcome outcome = Bench.run("correct", "nox", "30 ppm", "at", "3 %", "airO2", "21 %", "fd", "8710 scf68/MMBtu");
+        assertEquals(0.036397, Bench.in("lb/MMBtu", outcome, "perMMBtu"), 0.000003);
+    }
+
+    /**
      * By hand: 90 ppm in wet gas with 10 % water are 90 / (1 - 0.1) = 100 ppm dry; the wet O2 of 4.5 % is 5 % dry; to 3 % by the
      * 20.9 % rule: 100 (20.9 - 3)/(20.9 - 5) = 112.58 ppm.
      */
