@@ -38,7 +38,7 @@ final class Interactive {
         Editor editor = new Editor(terminal, this::vocabulary, historyFile(), output.colour(), this::warn);
         terminal.writer().print("Fluewright " + Main.version() + ", combustion stoichiometry\n"
             + "Tab completes, Ctrl-C stops, Ctrl-D leaves\n");
-        startBehind(editor);
+        startBehind(editor, terminal);
         for (String input = editor.read(); input != null && !leaves(input); input = editor.read()) {
             evaluate(input);
         }
@@ -53,19 +53,20 @@ final class Interactive {
         output.err().println("warning: " + text);
     }
 
-    private void startBehind(Editor editor) {
-        Thread start = new Thread(() -> open(editor), "warm-up");
+    private void startBehind(Editor editor, Terminal terminal) {
+        Thread start = new Thread(() -> open(editor, terminal), "warm-up");
         start.setDaemon(true);
         start.start();
     }
 
     /** Waits for the prompt first: until it stands, everything else would only delay it. */
-    private void open(Editor editor) {
+    private void open(Editor editor, Terminal terminal) {
         try {
             while (!editor.isReading()) {
                 Thread.sleep(5);
             }
-            Thread.sleep(15);
+            Thread.sleep(10);
+            Terminals.listen(terminal);
             Workspace opened = Workspace.open(options, output);
             workspace.complete(opened);
             opened.warmUp();
