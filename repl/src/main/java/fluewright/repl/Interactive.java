@@ -45,8 +45,11 @@ final class Interactive {
         return 0;
     }
 
+    /** In the folder that HOME names; Java's own idea of a home ignores HOME. */
     private static Path historyFile() {
-        return Path.of(System.getProperty("user.home"), ".fluewright", "history");
+        String home = System.getenv("HOME");
+        String usual = home == null || home.isEmpty() ? System.getProperty("user.home") : home;
+        return Path.of(System.getProperty("fluewright.home", usual), ".fluewright", "history");
     }
 
     private void warn(String text) {
@@ -96,9 +99,9 @@ final class Interactive {
         }
         Outcome outcome = workspace.join().evaluator().evaluate("input", input);
         if (outcome == Outcome.STOPPED) {
-            output.out().println("stopped");
+            output.out().println("\nstopped");
         } else if (outcome == Outcome.ABANDONED) {
-            output.out().println("it does not stop; it goes on in the background");
+            output.out().println("\nit does not stop; it goes on in the background");
         }
     }
 }
