@@ -38,7 +38,7 @@ final class Interactive {
         Editor editor = new Editor(terminal, this::vocabulary, historyFile(), output.colour(), this::warn);
         terminal.writer().print("Fluewright " + Main.version() + ", combustion stoichiometry\n"
             + "Tab completes, Ctrl-C stops, Ctrl-D leaves\n");
-        startBehind(editor, output.within(() -> columns(terminal)));
+        startBehind(editor, terminal);
         for (String input = editor.read(); input != null && !leaves(input); input = editor.read()) {
             evaluate(input);
         }
@@ -51,28 +51,32 @@ final class Interactive {
         return columns > 0 ? columns : 80;
     }
 
+    /** In the folder that HOME names; Java's own idea of a home ignores HOME. */
     private static Path historyFile() {
-        return Path.of(System.getProperty("user.home"), ".fluewright", "history");
+        String home = System.getenv("HOME");
+        String usual = home == null || home.isEmpty() ? System.getProperty("user.home") : home;
+        return Path.of(System.getProperty("fluewright.home", usual), ".fluewright", "history");
     }
 
     private void warn(String text) {
         output.err().println("warning: " + text);
     }
 
-    private void startBehind(Editor editor, Output results) {
-        Thread start = new Thread(() -> open(editor, results), "warm-up");
+    private void startBehind(Editor editor, Terminal terminal) {
+        Thread start = new Thread(() -> open(editor, terminal), "warm-up");
         start.setDaemon(true);
         start.start();
     }
 
     /** Waits for the prompt first: until it stands, everything else would only delay it. */
-    private void open(Editor editor, Output results) {
+    private void open(Editor editor, Terminal terminal) {
         try {
             while (!editor.isReading()) {
                 Thread.sleep(5);
             }
-            Thread.sleep(15);
-            Workspace opened = Workspace.open(options, results);
+            Thread.sleep(10);
+            Terminals.listen(terminal);
+            Workspace opened = Workspace.open(options, output.within(() -> columns(terminal)));
             workspace.complete(opened);
             opened.warmUp();
         } catch (InterruptedException | RuntimeException | Error failure) {
@@ -101,9 +105,9 @@ final class Interactive {
         }
         Outcome outcome = workspace.join().evaluator().evaluate("input", input);
         if (outcome == Outcome.STOPPED) {
-            output.out().println("stopped");
+            output.out().println("\nstopped");
         } else if (outcome == Outcome.ABANDONED) {
-            output.out().println("it does not stop; it goes on in the background");
+            output.out().println("\nit does not stop; it goes on in the background");
         }
     }
 }

@@ -32,7 +32,7 @@ public final class Training {
     /** @param arguments a folder for the files of the trial run */
     public static void main(String[] arguments) throws Exception {
         Path home = Files.createTempDirectory(Path.of(arguments[0]), "training");
-        System.setProperty("user.home", home.toString());
+        System.setProperty("fluewright.home", home.toString());
         PrintStream quiet = new PrintStream(OutputStream.nullOutputStream(), true, StandardCharsets.UTF_8);
         inBackground(Training::endLate);
         batch(quiet);
