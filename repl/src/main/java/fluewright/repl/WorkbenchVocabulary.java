@@ -76,7 +76,7 @@ final class WorkbenchVocabulary implements Vocabulary {
 
     private static Object member(Object value, String name) {
         if (value instanceof ResultView view) {
-            return view.outcome().names().contains(name) ? view.getProperty(name) : null;
+            return view.outcome().names().contains(name) ? view.get(name) : null;
         }
         return value instanceof Map<?, ?> map ? map.get(name) : null;
     }

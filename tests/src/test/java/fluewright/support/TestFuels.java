@@ -44,7 +44,7 @@ public final class TestFuels {
         Map<String, Double> shares = new LinkedHashMap<>();
         Matcher matcher = GAS_SHARE.matcher(composition);
         while (matcher.find()) {
-            if (GasComponents.all().containsKey(matcher.group(1))) {
+            if (GasComponents.titles().containsKey(matcher.group(1))) {
                 shares.put(matcher.group(1), Double.parseDouble(matcher.group(2)) / 100);
             }
         }

@@ -55,12 +55,13 @@ public record Outcome(Declaration<?, ?> declaration, Record input, Record result
 
     /** Returns a component of the result in the units of a system. */
     public Object get(String name, UnitSystem system) {
-        Term term = terms().get(name);
-        if (term == null) {
+        Term term = declaration.result().find(name).orElse(null);
+        Object value = term == null ? null : term.read(result);
+        if (value == null) {
             throw new InputException(EngineMessage.UNKNOWN_COMPONENT, Detail.at(declaration.name()).found(name)
                     .expected("one of " + String.join(", ", names())).nearest(NearestName.of(name, names())));
         }
-        return shown(term, term.read(result), system);
+        return shown(term, value, system);
     }
 
     /** Returns an input: a {@link Value} in the unit its kind is shown in, the object itself, or null when it was left out. */

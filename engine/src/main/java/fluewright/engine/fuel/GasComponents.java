@@ -11,11 +11,11 @@ import fluewright.engine.message.NearestName;
 import fluewright.engine.species.Element;
 import fluewright.engine.species.Species;
 import fluewright.engine.species.SpeciesTable;
-import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeSet;
+import java.util.concurrent.ConcurrentHashMap;
 
 /**
  * The components that a fuel gas may have: those of ISO 6976:2016 ({@code components.csv} beside this class) and stable
@@ -28,15 +28,19 @@ public final class GasComponents {
     /** Stable species that may stand in a fuel gas; radicals of the species table may not. */
     private static final List<String> BEYOND_ISO = List.of("CH3OCH3", "C2H5OH", "C3H4-propyne", "C3H6-cyclo", "C3H7OH-1",
             "C3H7OH-2", "CH3CHO", "C3H6O-acetone", "CH2O", "C8H8", "i-C8H18", "C10H8");
-    private static final Map<String, GasComponent> BY_SYMBOL = read();
-    private static final Map<String, GasComponent> BY_ANY_NAME = names();
+    private static final Map<String, NamedCsvRecord> ROWS = read();
+    private static final Map<String, String> SYMBOLS = symbols();
+    private static final Map<String, GasComponent> MADE = new ConcurrentHashMap<>();
 
     private GasComponents() {
     }
 
-    /** Returns all components by symbol. */
-    public static Map<String, GasComponent> all() {
-        return BY_SYMBOL;
+    /** Returns the names in words of all components by symbol. */
+    public static Map<String, String> titles() {
+        Map<String, String> titles = new LinkedHashMap<>();
+        ROWS.forEach((symbol, row) -> titles.put(symbol, row.getField("component")));
+        BEYOND_ISO.forEach(symbol -> titles.put(symbol, SpeciesTable.get(symbol).title()));
+        return titles;
     }
 
     /**
@@ -46,36 +50,38 @@ public final class GasComponents {
      * @throws InputException when there is none
      */
     public static GasComponent of(String name) {
-        GasComponent component = BY_ANY_NAME.get(name);
-        if (component == null) {
+        String symbol = SYMBOLS.get(name);
+        if (symbol == null) {
             throw new InputException(EngineMessage.UNKNOWN_FUEL_COMPONENT, Detail.at("gas").found(name)
                     .expected("a component of ISO 6976 such as CH4, C2H6, nC4H10, CO2, N2")
-                    .nearest(NearestName.of(name, new TreeSet<>(BY_ANY_NAME.keySet()))));
+                    .nearest(NearestName.of(name, new TreeSet<>(SYMBOLS.keySet()))));
         }
-        return component;
+        return MADE.computeIfAbsent(symbol, GasComponents::make);
     }
 
-    private static Map<String, GasComponent> names() {
-        Map<String, GasComponent> names = new LinkedHashMap<>();
-        BY_SYMBOL.forEach((symbol, component) -> {
-            names.put(symbol, component);
-            names.putIfAbsent(symbol.replace("-", "").replace(",", ""), component);
-            names.putIfAbsent(component.title(), component);
+    private static Map<String, String> symbols() {
+        Map<String, String> symbols = new LinkedHashMap<>();
+        titles().forEach((symbol, title) -> {
+            symbols.put(symbol, symbol);
+            symbols.putIfAbsent(symbol.replace("-", "").replace(",", ""), symbol);
+            symbols.putIfAbsent(title, symbol);
         });
-        return names;
+        return symbols;
     }
 
-    private static Map<String, GasComponent> read() {
-        Map<String, GasComponent> components = new LinkedHashMap<>();
+    private static GasComponent make(String symbol) {
+        NamedCsvRecord row = ROWS.get(symbol);
+        return row == null ? fromThermodynamicData(SpeciesTable.get(symbol))
+                : new GasComponent(symbol, row.getField("component"), Element.atoms(row.getField("elements")),
+                        number(row, "molar_mass") / 1000, numbers(row, COMBUSTION, 1000), numbers(row, METERING, 1), true);
+    }
+
+    private static Map<String, NamedCsvRecord> read() {
+        Map<String, NamedCsvRecord> rows = new LinkedHashMap<>();
         for (NamedCsvRecord row : DataFile.read(GasComponents.class, "components.csv")) {
-            String symbol = row.getField("species").isEmpty() ? row.getField("component") : row.getField("species");
-            components.put(symbol, new GasComponent(symbol, row.getField("component"), Element.atoms(row.getField("elements")),
-                    number(row, "molar_mass") / 1000, numbers(row, COMBUSTION, 1000), numbers(row, METERING, 1), true));
+            rows.put(row.getField("species").isEmpty() ? row.getField("component") : row.getField("species"), row);
         }
-        for (String symbol : BEYOND_ISO) {
-            components.put(symbol, fromThermodynamicData(SpeciesTable.get(symbol)));
-        }
-        return Collections.unmodifiableMap(components);
+        return rows;
     }
 
     private static double[] numbers(NamedCsvRecord row, String[] columns, double factor) {

@@ -12,22 +12,34 @@ import javax.measure.UnitConverter;
 public final class NamedUnit {
 
     private final String symbol;
-    private final Unit<?> unit;
-    private final Quantity.Scale scale;
-    private final Basis basis;
+    private final Unit<?> coherent;
     private final double factor;
     private final double offset;
+    private final Quantity.Scale scale;
+    private final Basis basis;
     private final Dimension dimension;
 
-    NamedUnit(String symbol, Unit<?> unit, Quantity.Scale scale, Basis basis) {
+    /**
+     * Makes a unit of {@code SI value = (number + offset) * factor}.
+     *
+     * @param coherent the coherent SI unit
+     */
+    NamedUnit(String symbol, Unit<?> coherent, double factor, double offset, Quantity.Scale scale, Basis basis) {
         this.symbol = symbol;
-        this.unit = unit;
+        this.coherent = coherent;
+        this.factor = factor;
+        this.offset = offset;
         this.scale = scale;
         this.basis = basis;
-        this.dimension = unit.getDimension();
+        this.dimension = coherent.getDimension();
+    }
+
+    /** Returns the unit of a JSR-385 unit from elsewhere. */
+    static NamedUnit of(Unit<?> unit, Quantity.Scale scale) {
         UnitConverter toSystem = toSystem(unit);
-        this.offset = toSystem.convert(0.0);
-        this.factor = offset == 0 ? toSystem.convert(1.0) : (toSystem.convert(1000.0) - offset) / 1000;
+        double zero = toSystem.convert(0.0);
+        double slope = zero == 0 ? toSystem.convert(1.0) : (toSystem.convert(1000.0) - zero) / 1000;
+        return new NamedUnit(unit.toString(), unit.getSystemUnit(), slope, zero / slope, scale, Basis.NONE);
     }
 
     private static <Q extends Quantity<Q>> UnitConverter toSystem(Unit<Q> unit) {
@@ -49,9 +61,10 @@ public final class NamedUnit {
         };
     }
 
-    /** Returns the JSR-385 unit. */
+    /** Returns the JSR-385 unit; made when asked for, since the library's factors take long to load. */
     public Unit<?> unit() {
-        return unit;
+        Unit<?> scaled = factor == 1 ? coherent : coherent.multiply(factor);
+        return offset == 0 ? scaled : scaled.shift(offset);
     }
 
     /** Returns the basis that the unit itself states. */
@@ -76,24 +89,26 @@ public final class NamedUnit {
 
     /** Returns the number in coherent SI units. */
     public double toSi(double number) {
-        return number * factor + offset;
+        return (number + offset) * factor;
     }
 
     /** Returns the number in this unit of a value in coherent SI units. */
     public double fromSi(double si) {
-        return (si - offset) / factor;
+        return si / factor - offset;
     }
 
     NamedUnit times(NamedUnit other) {
-        return new NamedUnit(joined(other, "*"), unit.multiply(other.unit), Quantity.Scale.ABSOLUTE, Basis.NONE);
+        return new NamedUnit(joined(other, "*"), coherent.multiply(other.coherent), factor * other.factor, 0,
+                Quantity.Scale.ABSOLUTE, Basis.NONE);
     }
 
     NamedUnit per(NamedUnit other) {
-        return new NamedUnit(joined(other, "/"), unit.divide(other.unit), Quantity.Scale.ABSOLUTE, Basis.NONE);
+        return new NamedUnit(joined(other, "/"), coherent.divide(other.coherent), factor / other.factor, 0,
+                Quantity.Scale.ABSOLUTE, Basis.NONE);
     }
 
     private String joined(NamedUnit other, String operator) {
-        boolean compound = operator.equals("/") && other.symbol.matches(".*[*/].*");
+        boolean compound = operator.equals("/") && (other.symbol.indexOf('/') >= 0 || other.symbol.indexOf('*') >= 0);
         return symbol + operator + (compound ? "(" + other.symbol + ")" : other.symbol);
     }
 

@@ -13,8 +13,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import javax.measure.Quantity;
-import javax.measure.Unit;
-import tech.units.indriya.AbstractUnit;
 
 /**
  * The units known by name. They stand in {@code units.csv} beside this class; products and quotients such as
@@ -71,21 +69,17 @@ public final class Units {
             return left == null || right == null ? null : symbol.charAt(operator) == '/' ? left.per(right) : left.times(right);
         }
         if (symbol.equals("1")) {
-            return new NamedUnit("1", AbstractUnit.ONE, Quantity.Scale.ABSOLUTE, Basis.NONE);
+            return new NamedUnit("1", CoherentUnits.of("1"), 1, 0, Quantity.Scale.ABSOLUTE, Basis.NONE);
         }
         String plain = symbol.equals("%") ? "pct" : symbol;
         return ROWS.containsKey(plain) ? fromRow(plain, ROWS.get(plain)) : null;
     }
 
     private static NamedUnit fromRow(String symbol, NamedCsvRecord row) {
-        Unit<?> unit = CoherentUnits.of(row.getField("si"));
-        double offset = Double.parseDouble(row.getField("offset"));
-        double factor = product(row.getField("factor"));
-        unit = factor == 1 ? unit : unit.multiply(factor);
-        unit = offset == 0 ? unit : unit.shift(offset);
         Basis basis = row.getField("basis").isEmpty() ? Basis.NONE : Basis.valueOf(row.getField("basis").toUpperCase(Locale.ROOT));
         Quantity.Scale scale = row.getField("scale").equals("relative") ? Quantity.Scale.RELATIVE : Quantity.Scale.ABSOLUTE;
-        return new NamedUnit(symbol, unit, scale, basis);
+        return new NamedUnit(symbol, CoherentUnits.of(row.getField("si")), product(row.getField("factor")),
+                Double.parseDouble(row.getField("offset")), scale, basis);
     }
 
     private static double product(String text) {

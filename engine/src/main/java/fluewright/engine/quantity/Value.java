@@ -259,7 +259,7 @@ public final class Value<Q extends Quantity<Q>> implements Quantity<Q>, Comparab
     }
 
     private static NamedUnit anonymous(Unit<?> unit, Scale scale) {
-        return new NamedUnit(unit.toString(), unit, scale, Basis.NONE);
+        return NamedUnit.of(unit, scale);
     }
 
     @SuppressWarnings("unchecked")

@@ -53,7 +53,7 @@ final class GasFunction implements ShellFunction {
     @Override
     public Map<String, String> openNames() {
         Map<String, String> names = new LinkedHashMap<>();
-        GasComponents.all().forEach((symbol, component) -> names.put(typed(symbol), component.title()));
+        GasComponents.titles().forEach((symbol, title) -> names.put(typed(symbol), title));
         return names;
     }
 

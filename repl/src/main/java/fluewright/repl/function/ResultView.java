@@ -3,12 +3,11 @@ package fluewright.repl.function;
 import fluewright.engine.calculation.Outcome;
 import fluewright.engine.message.Note;
 import fluewright.engine.quantity.UnitSystem;
-import groovy.lang.GroovyObjectSupport;
 import java.util.List;
 import java.util.function.Supplier;
 
 /** A result as the shell's language sees it: its components are properties, in the units of the session. */
-public final class ResultView extends GroovyObjectSupport {
+public final class ResultView {
 
     private final Outcome outcome;
     private final Supplier<UnitSystem> units;
@@ -24,12 +23,11 @@ public final class ResultView extends GroovyObjectSupport {
     }
 
     /**
-     * Returns a component as a quantity, a map of quantities or a text; {@code notes} are its notes, one a line.
+     * Returns a component, which Groovy takes for a property, as a quantity, a map of quantities or a text; {@code notes} are its notes, one a line.
      *
      * @throws fluewright.engine.message.InputException when the result has no such component
      */
-    @Override
-    public Object getProperty(String name) {
+    public Object get(String name) {
         if (name.equals("notes") && !outcome.names().contains(name)) {
             List<Note> notes = outcome.notes();
             return notes.stream().map(Note::text).toList();

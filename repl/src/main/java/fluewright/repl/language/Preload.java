@@ -1,14 +1,18 @@
 package fluewright.repl.language;
 
+import org.codehaus.groovy.ast.ClassHelper;
+
 /** Does on the second core what an evaluation needs only after its text has been parsed. */
 final class Preload {
     private static final String[] CLASS_WRITER = {"ClassWriter", "SymbolTable", "MethodWriter", "Frame", "Label",
         "Type", "CurrentFrame", "FieldWriter", "AnnotationWriter"};
+    /** Groovy initialises it for every class it completes, though a script that is not checked has no use for it. */
+    private static final String STATIC_CHECKER = "org.codehaus.groovy.transform.stc.StaticTypeCheckingVisitor";
 
     private Preload() {
     }
 
-    /** Starts the work, then loads the classes that write classes, and returns at once. */
+    /** Starts the work, then loads the classes that complete and write classes, and returns at once. */
     static void start(Runnable work) {
         Thread thread = new Thread(() -> run(work), "preload");
         thread.setDaemon(true);
@@ -18,6 +22,8 @@ final class Preload {
     private static void run(Runnable work) {
         work.run();
         try {
+            ClassHelper.make(ShellScript.class).getAllDeclaredMethods();
+            Class.forName(STATIC_CHECKER);
             for (String name : CLASS_WRITER) {
                 Class.forName("groovyjarjarasm.asm." + name);
             }
