@@ -11,8 +11,11 @@ public interface Session {
 
     ResultSink sink();
 
-    /** @param variables the user's variables, as they change */
-    Vocabulary vocabulary(Map<?, ?> variables);
+    /** Tells the session of the user's variables, before the first evaluation uses them; the map changes with them. */
+    void use(Map<?, ?> variables);
+
+    /** Returns what the editor can complete and colour. */
+    Vocabulary vocabulary();
 
     /** Loads what a first evaluation would wait for; runs behind the prompt. */
     default void warmUp() {

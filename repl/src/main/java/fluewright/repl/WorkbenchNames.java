@@ -64,6 +64,15 @@ final class WorkbenchNames implements Names {
     }
 
     @Override
+    public void prepare() {
+        try {
+            WarmUp.firstResult(workbench.get());
+        } catch (RuntimeException | LinkageError toldWhenUsed) {
+            // The text that needs it meets the same failure and tells it.
+        }
+    }
+
+    @Override
     public Collection<String> known() {
         return workbench.get().functions().stream().map(ShellFunction::name).toList();
     }

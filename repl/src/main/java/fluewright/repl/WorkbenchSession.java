@@ -23,18 +23,6 @@ final class WorkbenchSession implements Session {
     WorkbenchSession(Options options, Output output) {
         this.options = options;
         this.output = output;
-        Thread prepare = new Thread(this::prepare, "workbench");
-        prepare.setDaemon(true);
-        prepare.start();
-    }
-
-    /** Runs beside the compiler of the first text. */
-    private void prepare() {
-        try {
-            WarmUp.firstResult(workbench());
-        } catch (RuntimeException | LinkageError toldWhenUsed) {
-            // The text that needs it meets the same failure and tells it.
-        }
     }
 
     private synchronized Workbench workbench() {
@@ -71,9 +59,13 @@ final class WorkbenchSession implements Session {
     }
 
     @Override
-    public Vocabulary vocabulary(Map<?, ?> sessionVariables) {
+    public void use(Map<?, ?> sessionVariables) {
         this.variables = sessionVariables;
-        return new WorkbenchVocabulary(this::workbench, sessionVariables, new Printer(() -> workbench().shown()));
+    }
+
+    @Override
+    public Vocabulary vocabulary() {
+        return new WorkbenchVocabulary(this::workbench, variables, new Printer(() -> workbench().shown()));
     }
 
     @Override

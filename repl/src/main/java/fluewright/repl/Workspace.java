@@ -21,7 +21,10 @@ final class Workspace {
         session = Session.open(options, output);
         Names names = session.names();
         evaluator = new Evaluator(names, session.sink(), errors(names, output), output.interactive());
-        evaluator.whenReady(variables -> variables.setVariable("args", options.arguments().toArray(String[]::new)));
+        evaluator.whenReady(variables -> {
+            variables.setVariable("args", options.arguments().toArray(String[]::new));
+            session.use(variables.getVariables());
+        });
     }
 
     static Workspace open(Options options, Output output) {
@@ -61,7 +64,8 @@ final class Workspace {
     /** Made at the first call, for only the prompt needs it. */
     synchronized Vocabulary vocabulary() {
         if (vocabulary == null) {
-            vocabulary = session.vocabulary(evaluator.variables().getVariables());
+            session.use(evaluator.variables().getVariables());
+            vocabulary = session.vocabulary();
         }
         return vocabulary;
     }

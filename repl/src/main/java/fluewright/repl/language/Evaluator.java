@@ -31,7 +31,7 @@ public final class Evaluator {
         this.sink = sink;
         this.errors = errors;
         binding = new FutureTask<>(() -> new ShellBinding(names, sink));
-        Preload.start(binding);
+        Preload.start(binding, names::prepare);
         compiler = new ScriptCompiler(names, acknowledge);
     }
 

@@ -13,6 +13,10 @@ public interface Names {
     /** Calls a function; named arguments come first, as one map. */
     Object call(String name, Object[] arguments);
 
+    /** Does what a first call will need; called on another thread while a text is compiled. */
+    default void prepare() {
+    }
+
     /** Every known name, for suggestions. */
     Collection<String> known();
 }

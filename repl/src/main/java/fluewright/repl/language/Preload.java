@@ -12,15 +12,23 @@ final class Preload {
     private Preload() {
     }
 
-    /** Starts the work, then loads the classes that complete and write classes, and returns at once. */
-    static void start(Runnable work) {
-        Thread thread = new Thread(() -> run(work), "preload");
+    /**
+     * Starts the work, loads the classes that complete and write classes, then starts the rest, and returns at once. All
+     * on one thread: with more of them the compiler would have to share its core.
+     */
+    static void start(Runnable work, Runnable rest) {
+        Thread thread = new Thread(() -> run(work, rest), "preload");
         thread.setDaemon(true);
         thread.start();
     }
 
-    private static void run(Runnable work) {
+    private static void run(Runnable work, Runnable rest) {
         work.run();
+        loadClasses();
+        rest.run();
+    }
+
+    private static void loadClasses() {
         try {
             ClassHelper.make(ShellScript.class).getAllDeclaredMethods();
             Class.forName(STATIC_CHECKER);
