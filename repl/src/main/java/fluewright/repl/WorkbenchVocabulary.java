@@ -2,6 +2,7 @@ package fluewright.repl;
 
 import fluewright.engine.calculation.Term;
 import fluewright.engine.fuel.Fuel;
+import fluewright.engine.quantity.Kind;
 import fluewright.engine.quantity.Units;
 import fluewright.repl.editor.Vocabulary;
 import fluewright.repl.function.ResultView;
@@ -56,6 +57,14 @@ final class WorkbenchVocabulary implements Vocabulary {
     @Override
     public List<Word> units() {
         return Units.docs().entrySet().stream().map(unit -> new Word(unit.getKey(), unit.getValue())).toList();
+    }
+
+    @Override
+    public List<Word> units(String function, String argument) {
+        boolean calculation = workbench.get().catalog().has(function);
+        List<Kind> kinds = !calculation ? List.of()
+                : workbench.get().catalog().declaration(function).input().find(argument).map(Term::kinds).orElse(List.of());
+        return units().stream().filter(unit -> kinds.stream().anyMatch(kind -> kind.accepts(Units.of(unit.text())))).toList();
     }
 
     @Override

@@ -28,7 +28,7 @@ final class InputCompleter implements Completer {
         if (site.inString()) {
             addAll(candidates, strings(words, site, call), false);
         } else if (site.afterNumberDot()) {
-            addAll(candidates, words.units(), false);
+            addAll(candidates, units(words, site, call), false);
         } else if (site.afterDot()) {
             addAll(candidates, words.members(site.path()), false);
         } else {
@@ -47,6 +47,13 @@ final class InputCompleter implements Completer {
         return call.atFirstArgument() ? words.texts(call.function) : List.of();
     }
 
+    /** Those that fit the argument; all of them where none is known. */
+    private static List<Word> units(Vocabulary words, Site site, Site.Call call) {
+        List<Word> fitting = call == null || site.argumentBeingSet().isEmpty() ? List.of()
+            : words.units(call.function, site.argumentBeingSet());
+        return fitting.isEmpty() ? words.units() : fitting;
+    }
+
     private static List<Word> values(Vocabulary words, Site.Call call, String argument) {
         return words.arguments(call.function).stream()
             .filter(known -> known.name().equals(argument))
@@ -58,6 +65,9 @@ final class InputCompleter implements Completer {
             addQuoted(candidates, values(words, call, site.argumentBeingSet()));
         } else if (call != null) {
             addArguments(candidates, words.arguments(call.function), call.given());
+            if (!candidates.isEmpty() && site.isAtWordStart() && !call.atFirstArgument()) {
+                return;
+            }
         }
         addAll(candidates, words.variableWords(), false);
         addAll(candidates, words.functions(), true);

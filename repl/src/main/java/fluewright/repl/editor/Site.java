@@ -68,10 +68,17 @@ final class Site {
         return isBefore(1, ".");
     }
 
+    /** Whether nothing of a word is typed yet. */
+    boolean isAtWordStart() {
+        return start == text.length();
+    }
+
     /** The named argument whose value is being typed; empty when there is none. */
     String argumentBeingSet() {
-        boolean set = isBefore(1, ":") && before.size() > 1 && before.get(before.size() - 2).is(Kind.NAMED_ARGUMENT);
-        return set ? word(before.size() - 2) : "";
+        int behind = afterNumberDot() ? 2 : 0;
+        int colon = before.size() - 1 - behind;
+        boolean set = colon > 0 && word(colon).equals(":") && before.get(colon - 1).is(Kind.NAMED_ARGUMENT);
+        return set ? word(colon - 1) : "";
     }
 
     /** The innermost function call around the place, or null. */

@@ -38,6 +38,11 @@ public interface Vocabulary {
         return List.of();
     }
 
+    /** Units that can follow a number given to an argument; empty where nothing is known of it. */
+    default List<Word> units(String function, String argument) {
+        return List.of();
+    }
+
     /** Texts for the first positional string of a function, such as names of fuels. */
     default List<Word> texts(String function) {
         return List.of();

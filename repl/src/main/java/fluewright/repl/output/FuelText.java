@@ -28,8 +28,9 @@ final class FuelText {
 
     /** Returns the fuel on one line. */
     String oneLine() {
-        return fuel.title() + (fuel.title().equals(fuel.id()) ? "" : " (" + fuel.id() + ")") + ", " + fuel.phase().label() + ", "
-                + shown(fuel.gross(), Kind.ENERGY_PER_MASS, Basis.GROSS);
+        String id = fuel.title().equals(fuel.id()) ? "" : " (" + fuel.id() + ")";
+        String phase = fuel.title().equals(fuel.phase().label()) ? "" : ", " + fuel.phase().label();
+        return fuel.title() + id + phase + ", " + shown(fuel.gross(), Kind.ENERGY_PER_MASS, Basis.GROSS);
     }
 
     List<String> lines() {

@@ -11,6 +11,7 @@ import fluewright.repl.function.FunctionHandle;
 import fluewright.repl.function.HelpText;
 import fluewright.repl.function.ResultView;
 import groovy.json.JsonOutput;
+import java.util.Arrays;
 import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -58,6 +59,9 @@ public final class JsonLine {
             Map<String, Object> members = new LinkedHashMap<>();
             map.forEach((name, part) -> members.put(String.valueOf(name), json(part)));
             return members;
+        }
+        if (value instanceof Object[] array) {
+            return json(Arrays.asList(array));
         }
         if (value instanceof Collection<?> parts) {
             return parts.stream().map(this::json).toList();

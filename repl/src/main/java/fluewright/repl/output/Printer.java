@@ -9,6 +9,7 @@ import fluewright.repl.function.FunctionHandle;
 import fluewright.repl.function.HelpText;
 import fluewright.repl.function.ResultView;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collection;
 import java.util.List;
 import java.util.Map;
@@ -61,6 +62,9 @@ public final class Printer {
         }
         if (value instanceof HelpText text) {
             return text.lines();
+        }
+        if (value instanceof Object[] parts) {
+            return unwrapped(Arrays.asList(parts));
         }
         if (value instanceof Value<?> number) {
             return List.of(OutcomeText.rounded(number));

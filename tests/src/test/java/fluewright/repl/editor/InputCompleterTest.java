@@ -42,6 +42,13 @@ class InputCompleterTest {
     }
 
     @Test
+    void offersOnlyWhatFitsWhereAnArgumentOrItsUnitIsNext() {
+        assertEquals(List.of("air:", "method:"), offered("burn ng, "));
+        assertEquals(List.of("pct"), offered("burn ng, air: 3."));
+        assertEquals(List.of("kW", "degC"), offered("burn ng, method: 3."));
+    }
+
+    @Test
     void offersNothingInComments() {
         assertEquals(List.of(), offered("1 // bu"));
     }

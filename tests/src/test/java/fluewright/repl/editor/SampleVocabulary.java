@@ -31,6 +31,11 @@ class SampleVocabulary implements Vocabulary {
     }
 
     @Override
+    public List<Word> units(String function, String argument) {
+        return argument.equals("air") ? List.of(new Word("pct", "percent")) : List.of();
+    }
+
+    @Override
     public List<Word> texts(String function) {
         return List.of(new Word("natural gas", "a gas"));
     }
