@@ -1,6 +1,6 @@
 package fluewright.repl;
 
-import fluewright.repl.language.Nearest;
+import fluewright.engine.message.NearestName;
 import java.nio.file.Path;
 import java.util.List;
 
@@ -91,9 +91,9 @@ public record Options(Task task, String expression, String script, List<String> 
         }
 
         private static Unusable unknown(String option) {
-            List<String> near = Nearest.of(option, KNOWN);
+            String near = NearestName.of(option, KNOWN);
             return new Unusable("unknown option " + option
-                + (near.isEmpty() ? "; see fluewright --help" : "; did you mean " + near.get(0) + "?"));
+                + (near.isEmpty() ? "; see fluewright --help" : "; did you mean " + near + "?"));
         }
 
         private Task task() {

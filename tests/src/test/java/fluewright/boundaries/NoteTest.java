@@ -41,6 +41,13 @@ class NoteTest {
         assertFalse(has(Bench.run("losses", TestFuels.METHANE, "excessAir", "15 %", "stack", "60 degC"), EngineMessage.BELOW_DEW_POINT));
     }
 
+    @Test
+    void losses_of_more_than_all_heat_are_warned_of() {
+        Outcome all = Bench.run("losses", TestFuels.METHANE, "excessAir", "15 %", "stack", "150 degC", "radiation", "90 %");
+        assertTrue(has(all, EngineMessage.LOSSES_EXCEED_HEAT));
+        assertFalse(has(Bench.run("losses", TestFuels.METHANE, "excessAir", "15 %", "stack", "150 degC"), EngineMessage.LOSSES_EXCEED_HEAT));
+    }
+
     /** Common practice: a correction from an O2 near that of air is not to be trusted. */
     @Test
     void a_correction_from_near_the_oxygen_of_air_is_warned_of() {

@@ -166,6 +166,8 @@ class RefusalTest {
         Bench.run("burn", TestFuels.METHANE, "co2", "11.7 %");
         refused(EngineMessage.CO2_ABOVE_MAXIMUM, () -> Bench.run("burn", TestFuels.HYDROGEN, "co2", "5 %"));
         refused(EngineMessage.READING_CONTRADICTS, () -> Bench.run("burn", TestFuels.METHANE, "co2", "0.01 %"));
+        assertEquals("19 %", refused(EngineMessage.CO2_ABOVE_MAXIMUM, () -> Bench.run("correct", TestFuels.METHANE, "nox", "30 ppm",
+                "atCo2", "19 %")).detail().found());
     }
 
     @ParameterizedTest

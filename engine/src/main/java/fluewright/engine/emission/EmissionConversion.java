@@ -143,6 +143,10 @@ final class EmissionConversion {
         AirSetting setting = input.at().isPresent() ? new AirSetting.OxygenDry(input.at().getAsDouble())
                 : input.atWet().isPresent() ? new AirSetting.OxygenWet(input.atWet().getAsDouble())
                 : input.atCo2().isPresent() ? new AirSetting.CarbonDioxideDry(input.atCo2().getAsDouble()) : null;
+        if (input.atCo2().orElse(0) > s.co2Maximum()) {
+            throw new InputException(EngineMessage.CO2_ABOVE_MAXIMUM, Detail.at("correct atCo2").found(percent(input.atCo2().getAsDouble()))
+                    .expected("up to " + percent(s.co2Maximum()) + " dry for " + input.fuel().get().id()));
+        }
         double dryAir = setting == null ? Double.NaN : setting.dryAir(s, Air.DRY, 0);
         return dryAir >= s.theoreticalAir() * (1 - 1e-9) && Double.isFinite(dryAir) ? s.flueGas(dryAir, Air.DRY, 0) : null;
     }

@@ -94,6 +94,10 @@ public final class FlueLosses implements Calculation<FlueLosses.Input, FlueLosse
         double flueLoss = dryGas + fromHydrogen + fuelMoisture + airMoisture + monoxide - credit;
         double unburned = firing.unburned() * HeatingValue.CARBON / gross;
         double efficiency = 1 - flueLoss - unburned - input.radiation() - input.other();
+        if (efficiency < 0) {
+            notes.warn(EngineMessage.LOSSES_EXCEED_HEAT, Detail.at("losses").found(Numbers.rounded(100 * (1 - efficiency), 5) + " %")
+                    .expected("less than 100 % gross"));
+        }
         double latent = fuel.makeup().waterFormed() * HeatingValue.VAPORIZATION / gross;
         double grossToNet = gross / fuel.net();
         return new Result(gas.lambda() - 1, dryGas, fromHydrogen, fuelMoisture, airMoisture, monoxide, credit, flueLoss,

@@ -82,9 +82,11 @@ public enum EngineMessage implements Message {
     NOT_IN_ISO_6976("the component is not in ISO 6976; its heating value is from NASA Glenn data"),
     /** Flue gas colder than its water dew point. */
     BELOW_DEW_POINT("the flue gas is below its water dew point; all water is counted as vapour, so the true loss is smaller"),
+    /** Losses of more than all the heat there is. */
+    LOSSES_EXCEED_HEAT("the losses are more than the heat fired"),
     /** Flue gas colder than the combustion air. */
     COLDER_THAN_AIR("the flue gas is colder than the combustion air"),
-    /** The dew point line ends at the boiling or the critical point. */
+    /** A dew point below the triple point of water. */
     FROST_POINT("the water freezes out: this is the frost point, over ice"),
     /** A correction that magnifies every error of the O2 reading. */
     ILL_CONDITIONED("the O2 is close to that of air: the correction magnifies every error of the reading"),

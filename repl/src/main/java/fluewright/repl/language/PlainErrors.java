@@ -1,6 +1,7 @@
 package fluewright.repl.language;
 
 import fluewright.engine.message.InputException;
+import fluewright.engine.message.NearestName;
 import groovy.lang.MissingMethodException;
 import groovy.lang.MissingPropertyException;
 import java.util.ArrayList;
@@ -102,8 +103,8 @@ public final class PlainErrors implements ErrorPrinter {
     }
 
     private List<String> withNear(String text, String name) {
-        List<String> near = Nearest.of(name, names.get());
-        return List.of(near.isEmpty() ? text : text + "; did you mean " + String.join(", ", near) + "?");
+        String near = NearestName.of(name, names.get());
+        return List.of(near.isEmpty() ? text : text + "; did you mean " + near + "?");
     }
 
     private static String argumentTypes(Object[] arguments) {

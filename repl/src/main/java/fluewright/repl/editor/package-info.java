@@ -1,0 +1,2 @@
+/** Line editing: keys, colours, completion, history and multi-line input. */
+package fluewright.repl.editor;
