@@ -119,15 +119,8 @@ final class Arguments {
             return Value.of(number.doubleValue(), kind.si());
         }
         UnitSystem system = reading.bareNumbers().orElseThrow(() -> new InputException(EngineMessage.UNIT_MISSING,
-                at(term).found(number).expected(expected(term)).nearest(suggestion(term, kind, number))));
+                at(term).found(number).expected(expected(term)).nearest(TermText.withUnit(term.name(), number, kind))));
         return Value.of(number.doubleValue(), kind.shown(system));
-    }
-
-    private static String suggestion(Term term, Kind kind, Number number) {
-        String symbol = kind.shown(UnitSystem.SI).symbol();
-        int slash = symbol.indexOf('/');
-        String typed = slash < 0 ? symbol : symbol.substring(0, slash) + symbol.substring(slash);
-        return term.name() + ": " + number + "." + typed + ", or 'units si' / 'units us' to read bare numbers";
     }
 
     private Object choice(Term term, Object given) {

@@ -24,6 +24,11 @@ public final class TermText {
         return kinds + (term.basis() == Basis.NONE ? "" : ", " + term.basis().label());
     }
 
+    /** Returns the two ways to mend a number without its unit. */
+    public static String withUnit(String name, Number number, Kind kind) {
+        return name + ": " + number + "." + kind.shown(UnitSystem.SI).symbol() + ", or 'units si' / 'units us' to read bare numbers";
+    }
+
     private static String kind(Kind kind) {
         if (kind.isPure()) {
             return kind.title();

@@ -85,8 +85,8 @@ public record Firing(
         double carbon = unburnedCarbon.orElse(makeup.ash() * share / (1 - share));
         double burnable = Math.min(makeup.atoms(Element.C), makeup.oxygenDemand()) * Element.C.molarMass();
         if (carbon >= burnable && carbon > 0) {
-            throw new InputException(EngineMessage.MORE_CARBON_THAN_FUEL, Detail.at("unburned carbon").found(percent(carbon))
-                    .expected("less than the fuel's " + percent(burnable)));
+            throw new InputException(EngineMessage.MORE_CARBON_THAN_FUEL, Detail.at("unburned carbon").found(Numbers.percent(carbon))
+                    .expected("less than the fuel's " + Numbers.percent(burnable)));
         }
         return carbon;
     }
@@ -103,7 +103,7 @@ public record Firing(
         }
         Air humid = Air.humid(ambient.orElse(air), pressure, humidity.getAsDouble());
         if (!(humid.waterRatio() >= 0 && Double.isFinite(humid.waterRatio()))) {
-            throw new InputException(EngineMessage.IMPOSSIBLE, Detail.at("humidity").found(percent(humidity.getAsDouble()) + " at "
+            throw new InputException(EngineMessage.IMPOSSIBLE, Detail.at("humidity").found(Numbers.percent(humidity.getAsDouble()) + " at "
                     + Numbers.rounded(ambient.orElse(air) - 273.15, 6) + " degC").expected("air below the boiling point of water")
                     .nearest("give the temperature the humidity was measured at: ambient: 20.degC"));
         }
@@ -134,36 +134,32 @@ public record Firing(
 
     private static void requireBelowAir(String where, double found, double ofAir, String which) {
         if (!(found < ofAir)) {
-            throw new InputException(EngineMessage.OXYGEN_OF_AIR, Detail.at(where).found(percent(found))
-                    .expected("below the " + percent(ofAir) + " of " + which + " air")
+            throw new InputException(EngineMessage.OXYGEN_OF_AIR, Detail.at(where).found(Numbers.percent(found))
+                    .expected("below the " + Numbers.percent(ofAir) + " of " + which + " air")
                     .nearest("check the sample line for a leak and the cell's calibration"));
         }
     }
 
     private InputException contradiction(Stoichiometry s) {
-        String found = co2.isPresent() ? "CO2 " + percent(co2.getAsDouble()) : "O2 and CO";
-        String expected = s.carbon() > 0 ? "CO2 up to " + percent(s.co2Maximum()) + " dry" : "a fuel with carbon; this one gives no CO2";
+        String found = co2.isPresent() ? "CO2 " + Numbers.percent(co2.getAsDouble()) : "O2 and CO";
+        String expected = s.carbon() > 0 ? "CO2 up to " + Numbers.percent(s.co2Maximum()) + " dry" : "a fuel with carbon; this one gives no CO2";
         return new InputException(EngineMessage.READING_CONTRADICTS, Detail.at(fuel.id()).found(found).expected(expected));
     }
 
     private void requireComplete(FlueGas gas, Stoichiometry s) {
         double dry = gas.dry().total();
         if (co * dry > s.carbon()) {
-            throw new InputException(EngineMessage.READING_CONTRADICTS, Detail.at("co").found("CO " + percent(co))
-                    .expected("CO up to " + percent(s.carbon() / dry) + " dry, all carbon of " + fuel.id()));
+            throw new InputException(EngineMessage.READING_CONTRADICTS, Detail.at("co").found("CO " + Numbers.percent(co))
+                    .expected("CO up to " + Numbers.percent(s.carbon() / dry) + " dry, all carbon of " + fuel.id()));
         }
         boolean enoughOxygen = gas.wet().moles().values().stream().allMatch(n -> n >= 0);
         if (!enoughOxygen && co2.isPresent()) {
-            throw new InputException(EngineMessage.CO2_ABOVE_MAXIMUM, Detail.at("co2").found(percent(co2.getAsDouble()))
-                    .expected("up to " + percent(s.co2Maximum()) + " dry for " + fuel.id()));
+            throw new InputException(EngineMessage.CO2_ABOVE_MAXIMUM, Detail.at("co2").found(Numbers.percent(co2.getAsDouble()))
+                    .expected("up to " + Numbers.percent(s.co2Maximum()) + " dry for " + fuel.id()));
         }
         if (!enoughOxygen) {
             throw new InputException(EngineMessage.TOO_LITTLE_AIR, Detail.at("air").found("lambda " + Numbers.rounded(gas.lambda(), 5)
-                    + ", CO " + percent(co)).expected("lambda 1 or more, or as much CO as the missing oxygen leaves"));
+                    + ", CO " + Numbers.percent(co)).expected("lambda 1 or more, or as much CO as the missing oxygen leaves"));
         }
-    }
-
-    private static String percent(double share) {
-        return Numbers.rounded(share * 100, 5) + " %";
     }
 }

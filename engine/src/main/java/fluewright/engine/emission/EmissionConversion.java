@@ -85,7 +85,7 @@ final class EmissionConversion {
         }
         Stated only = given.values().iterator().next();
         if (only.kind() == Kind.TRACE && only.value() > 1) {
-            throw new InputException(EngineMessage.IMPOSSIBLE, Detail.at("correct").found(percent(only.value())).expected("0 to 1000000 ppm"));
+            throw new InputException(EngineMessage.IMPOSSIBLE, Detail.at("correct").found(Numbers.percent(only.value())).expected("0 to 1000000 ppm"));
         }
         return given;
     }
@@ -144,8 +144,8 @@ final class EmissionConversion {
                 : input.atWet().isPresent() ? new AirSetting.OxygenWet(input.atWet().getAsDouble())
                 : input.atCo2().isPresent() ? new AirSetting.CarbonDioxideDry(input.atCo2().getAsDouble()) : null;
         if (input.atCo2().orElse(0) > s.co2Maximum()) {
-            throw new InputException(EngineMessage.CO2_ABOVE_MAXIMUM, Detail.at("correct atCo2").found(percent(input.atCo2().getAsDouble()))
-                    .expected("up to " + percent(s.co2Maximum()) + " dry for " + input.fuel().get().id()));
+            throw new InputException(EngineMessage.CO2_ABOVE_MAXIMUM, Detail.at("correct atCo2").found(Numbers.percent(input.atCo2().getAsDouble()))
+                    .expected("up to " + Numbers.percent(s.co2Maximum()) + " dry for " + input.fuel().get().id()));
         }
         double dryAir = setting == null ? Double.NaN : setting.dryAir(s, Air.DRY, 0);
         return dryAir >= s.theoreticalAir() * (1 - 1e-9) && Double.isFinite(dryAir) ? s.flueGas(dryAir, Air.DRY, 0) : null;
@@ -180,15 +180,15 @@ final class EmissionConversion {
         requireBelowAir("to", input.to().orElse(0));
         requireBelowAir("atWet", input.atWet().orElse(0));
         if (ofAir - oxygen < NEAR_AIR) {
-            notes.warn(EngineMessage.ILL_CONDITIONED, Detail.at("O2").found(percent(oxygen) + " dry")
+            notes.warn(EngineMessage.ILL_CONDITIONED, Detail.at("O2").found(Numbers.percent(oxygen) + " dry")
                     .expected("0.1 points of O2 move the result by " + Numbers.rounded(0.1 / (ofAir - oxygen), 2) + " %"));
         }
     }
 
     private void requireBelowAir(String where, double found) {
         if (found >= ofAir) {
-            throw new InputException(EngineMessage.OXYGEN_OF_AIR, Detail.at("correct " + where).found(percent(found))
-                    .expected("below the " + percent(ofAir) + " of dry air: there would be no flue gas to correct for")
+            throw new InputException(EngineMessage.OXYGEN_OF_AIR, Detail.at("correct " + where).found(Numbers.percent(found))
+                    .expected("below the " + Numbers.percent(ofAir) + " of dry air: there would be no flue gas to correct for")
                     .nearest("check the sample line for a leak and the cell's calibration"));
         }
     }
@@ -251,12 +251,8 @@ final class EmissionConversion {
 
     private void requireBelowAirWet(double airWet) {
         if (input.atWet().getAsDouble() >= airWet) {
-            throw new InputException(EngineMessage.OXYGEN_OF_AIR, Detail.at("correct atWet").found(percent(input.atWet().getAsDouble()))
-                    .expected("below the " + percent(airWet) + " of this air"));
+            throw new InputException(EngineMessage.OXYGEN_OF_AIR, Detail.at("correct atWet").found(Numbers.percent(input.atWet().getAsDouble()))
+                    .expected("below the " + Numbers.percent(airWet) + " of this air"));
         }
-    }
-
-    private static String percent(double share) {
-        return Numbers.rounded(share * 100, 5) + " %";
     }
 }

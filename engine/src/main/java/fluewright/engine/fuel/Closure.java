@@ -24,13 +24,13 @@ final class Closure {
         shares.forEach((name, share) -> requireShare(where, name, share));
         double sum = shares.values().stream().mapToDouble(Double::doubleValue).sum();
         if (!(Math.abs(sum - 1) <= TOLERANCE + ROUNDING)) {
-            throw new InputException(EngineMessage.NOT_CLOSED, Detail.at(where).found(percent(sum))
+            throw new InputException(EngineMessage.NOT_CLOSED, Detail.at(where).found(Numbers.percent(sum))
                     .expected("100 % within 1 %" + hint));
         }
         if (Math.abs(sum - 1) <= ROUNDING) {
             return shares;
         }
-        notes.remark(EngineMessage.NORMALISED, Detail.at(where).found(percent(sum)));
+        notes.remark(EngineMessage.NORMALISED, Detail.at(where).found(Numbers.percent(sum)));
         Map<String, Double> scaled = new LinkedHashMap<>();
         shares.forEach((name, share) -> scaled.put(name, share / sum));
         return scaled;
@@ -39,11 +39,7 @@ final class Closure {
     static void requireShare(String where, String name, double share) {
         if (!(share >= 0 && share <= 1)) {
             throw new InputException(EngineMessage.IMPOSSIBLE,
-                    Detail.at(where + " " + name).found(percent(share)).expected("0 % to 100 %"));
+                    Detail.at(where + " " + name).found(Numbers.percent(share)).expected("0 % to 100 %"));
         }
-    }
-
-    private static String percent(double share) {
-        return Double.isFinite(share) ? Numbers.rounded(share * 100, 8) + " %" : String.valueOf(share);
     }
 }

@@ -1,5 +1,6 @@
 package fluewright.engine.fuel;
 
+import fluewright.engine.species.Element;
 import fluewright.engine.species.SpeciesTable;
 
 /**
@@ -18,7 +19,7 @@ public record HeatingValue(double gross, String method) {
             SpeciesTable.get("CO").enthalpyOfFormation() - SpeciesTable.get("CO2").enthalpyOfFormation();
 
     /** Heat of combustion of carbon in ash and soot at 25 degC [J/kg]: graphite 393.51 kJ/mol (NASA Glenn, CO2 formation). */
-    public static final double CARBON = -SpeciesTable.get("CO2").enthalpyOfFormation() / 12.0107e-3;
+    public static final double CARBON = -SpeciesTable.get("CO2").enthalpyOfFormation() / Element.C.molarMass();
 
     /** Returns the net heating value [J/kg as fired]: the gross one less the heat of condensing all water formed. */
     public double net(Makeup makeup) {

@@ -47,8 +47,6 @@ public enum EngineMessage implements Message {
     NOT_CLOSED("the composition does not add up to 100 %"),
     /** A fuel without anything to burn. */
     NOTHING_TO_BURN("the fuel has nothing to burn"),
-    /** A heating value is needed and cannot be had. */
-    NO_HEATING_VALUE("the heating value is not known"),
     /** A blend that cannot be made on this basis. */
     CANNOT_BLEND("these fuels cannot be blended on this basis"),
     /** A request that only gases can answer. */

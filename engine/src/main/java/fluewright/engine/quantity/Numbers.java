@@ -25,6 +25,11 @@ public final class Numbers {
         return text(rounded, number);
     }
 
+    /** Returns a share [-] in percent for people, to seven digits. */
+    public static String percent(double share) {
+        return Double.isFinite(share) ? rounded(share * 100, 7) + " %" : String.valueOf(share);
+    }
+
     private static String text(BigDecimal decimal, double number) {
         double size = Math.abs(number);
         if (size == 0) {

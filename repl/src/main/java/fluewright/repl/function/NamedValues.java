@@ -1,6 +1,7 @@
 package fluewright.repl.function;
 
 import fluewright.engine.calculation.Reading;
+import fluewright.engine.calculation.TermText;
 import fluewright.engine.message.Detail;
 import fluewright.engine.message.EngineMessage;
 import fluewright.engine.message.InputException;
@@ -98,8 +99,7 @@ final class NamedValues {
         }
         if (given instanceof Number number) {
             UnitSystem system = reading.bareNumbers().orElseThrow(() -> new InputException(EngineMessage.UNIT_MISSING,
-                    Detail.at(function + " " + name).found(number).expected(example(kind)).nearest(name + ": " + number + "."
-                            + kind.shown(UnitSystem.SI).symbol() + ", or 'units si' / 'units us' to read bare numbers")));
+                    Detail.at(function + " " + name).found(number).expected(example(kind)).nearest(TermText.withUnit(name, number, kind))));
             return Value.of(number.doubleValue(), kind.shown(system));
         }
         if (given instanceof CharSequence text) {
